@@ -1,0 +1,38 @@
+package throwbench.solver.chamber;
+
+import throwbench.solver.fluid.Fluid;
+import throwbench.solver.mechanism.Linkage;
+import throwbench.solver.mechanism.Rotation;
+
+/**
+ * All that a cycle needs to be solved.
+ *
+ * @param meanSpeed of the shaft, rad/s: cycles run at the constant mean speed
+ * @param flowAllowance share of the capacity lost to heating, leakage and slip
+ */
+public record ChamberDuty(
+        Linkage linkage,
+        Rotation rotation,
+        ChamberVolume volume,
+        Fluid fluid,
+        LineConditions lines,
+        ChamberCondition condition,
+        double meanSpeed,
+        double flowAllowance) {
+
+    /** The crank angle (rad) at which the chamber has a volume (m³), on the stroke on which it grows or falls. */
+    double crankAngleAt(double chamberVolume, boolean growing) {
+        Linkage.TravelAngles angles = linkage.anglesAtTravel(volume.travelAt(chamberVolume), rotation);
+        return volume.growsOn(true) == growing ? angles.inward() : angles.outward();
+    }
+
+    /** The crank angle (rad, in [0, 2π)) of the chamber's least volume. */
+    double leastVolumeAngle() {
+        return volume.side() == Side.HEAD ? 0 : linkage.crankEndDeadCentre(rotation);
+    }
+
+    /** The crank angle (rad, in [0, 2π)) of its greatest volume. */
+    double greatestVolumeAngle() {
+        return volume.side() == Side.HEAD ? linkage.crankEndDeadCentre(rotation) : 0;
+    }
+}

@@ -1,0 +1,26 @@
+package throwbench.solver.chamber;
+
+import java.util.List;
+import java.util.OptionalDouble;
+
+/** A solved cycle: the chamber's pressure at any crank angle, and what it passes in a turn. Immutable. */
+public interface PressureCurve {
+
+    /** Fills the pressure at every station of a sweep, Pa absolute. */
+    void fill(ChamberSweep sweep, double[] pressure);
+
+    /** When valves open and shut, by crank angle. */
+    List<ValveEvent> events();
+
+    /** Mass passed in a turn, kg, flow allowance taken off; empty where a gas's suction temperature is not known. */
+    OptionalDouble massPerTurn();
+
+    /** The same at suction line conditions, m³; 0 when no valve opens. */
+    double inletVolumePerTurn();
+
+    /** Temperature of what is discharged, K; empty where nothing is, or where it is not known. */
+    OptionalDouble dischargeTemperature();
+
+    /** What a user must be told of this cycle, in sentences without the chamber's name. */
+    List<String> notes();
+}

@@ -1,0 +1,8 @@
+/**
+ * The machine file: its text, its quantities with their units, its faults, and the way from it to a machine. The only
+ * package that knows units. Uses {@code machine} and what that uses.
+ */
+@NullMarked
+package throwbench.solver.document;
+
+import org.jspecify.annotations.NullMarked;
