@@ -1,13 +1,20 @@
 package throwbench.solver.chamber;
 
+import java.util.List;
+
 /**
  * Pressure measured on a machine, over the crank angle of the chamber's own throw.
  *
  * @param file path as the machine file has it, relative to it
- * @param crankAngles φ, rad, strictly rising in [0, 2π), at least 8; not copied, not to be changed
- * @param pressures Pa absolute, one per angle; not copied, not to be changed
+ * @param crankAngles φ, rad, strictly rising in [0, 2π), at least 8
+ * @param pressures Pa absolute, one an angle
  */
-public record RecordedPressure(String file, double[] crankAngles, double[] pressures) implements Cycle {
+public record RecordedPressure(String file, List<Double> crankAngles, List<Double> pressures) implements Cycle {
+
+    public RecordedPressure {
+        crankAngles = List.copyOf(crankAngles);
+        pressures = List.copyOf(pressures);
+    }
 
     @Override
     public String kind() {

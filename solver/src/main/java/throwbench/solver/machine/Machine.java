@@ -44,4 +44,13 @@ public record Machine(
                 .findFirst()
                 .orElseThrow(() -> new IllegalArgumentException("no stage \"" + stageName + "\""));
     }
+
+    /** The fluid of a stage. */
+    public Fluid fluidOf(String stageName) {
+        Fluid fluid = fluids.get(stage(stageName).fluid());
+        if (fluid == null) {
+            throw new IllegalArgumentException("stage \"" + stageName + "\" has no fluid");
+        }
+        return fluid;
+    }
 }

@@ -14,12 +14,10 @@ public final class TypedValue {
     // digits kept of a computed number: more than any drawing has, fewer than rounding errors need
     private static final int COMPUTED_DIGITS = 12;
 
-    private final String typed;
     private final Dimension dimension;
     private final Optional<Quantity> present;
 
-    private TypedValue(String typed, Dimension dimension, Optional<Quantity> present) {
-        this.typed = typed;
+    private TypedValue(Dimension dimension, Optional<Quantity> present) {
         this.dimension = dimension;
         this.present = present;
     }
@@ -44,7 +42,7 @@ public final class TypedValue {
                     "\"" + comma + "\" can be read in two ways",
                     NumberText.write(Double.parseDouble(point), 17) + " or " + comma.replace(",", ""));
         }
-        TypedValue value = new TypedValue(typed, dimension, present);
+        TypedValue value = new TypedValue(dimension, present);
         String canonical = value.canonical(plain.replace(',', '.'));
         return QuantityText.read(canonical.isEmpty() ? typed.strip() : canonical, dimension, ambientPressure);
     }

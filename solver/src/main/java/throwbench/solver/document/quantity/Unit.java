@@ -55,7 +55,7 @@ public enum Unit {
     POUND_FORCE(Dimension.FORCE, "lbf", 4.4482216152605, 1),
     NEWTON_METRE(Dimension.TORQUE, "N m", 1, 1),
     KILONEWTON_METRE(Dimension.TORQUE, "kN m", 1e3, 1),
-    POUND_FORCE_FOOT(Dimension.TORQUE, "lbf ft", 1.3558179483314004, 1),
+    POUND_FORCE_FOOT(Dimension.TORQUE, "lbf ft", 4.4482216152605 * 0.3048, 1),
     KELVIN(Dimension.TEMPERATURE, "K", 1, 1),
     DEGREE_CELSIUS(Dimension.TEMPERATURE, "degC", 1, 1, 273.15),
     DEGREE_FAHRENHEIT(Dimension.TEMPERATURE, "degF", 5, 9, 459.67),
@@ -80,7 +80,7 @@ public enum Unit {
     WATT(Dimension.POWER, "W", 1, 1),
     KILOWATT(Dimension.POWER, "kW", 1e3, 1),
     MEGAWATT(Dimension.POWER, "MW", 1e6, 1),
-    HORSEPOWER(Dimension.POWER, "hp", 745.69987158227022, 1),
+    HORSEPOWER(Dimension.POWER, "hp", 745.6998715822702, 1),
     ONE(Dimension.NUMBER, "", 1, 1),
     PERCENT(Dimension.NUMBER, "%", 1, 100);
 

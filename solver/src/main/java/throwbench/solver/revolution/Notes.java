@@ -1,0 +1,36 @@
+package throwbench.solver.revolution;
+
+import java.util.ArrayList;
+import java.util.List;
+import throwbench.solver.load.ConnectingRod;
+import throwbench.solver.machine.Chamber;
+
+/** What a user must be told of a solution: assumptions made for missing values, chambers that deliver nothing. */
+final class Notes {
+
+    private Notes() {}
+
+    static List<String> of(RunningMachine running, int shown) {
+        List<String> notes = new ArrayList<>();
+        RunningThrow t = running.throwsInOrder().get(shown);
+        String name = "throw " + t.described().name();
+        ConnectingRod rod = t.described().connectingRod();
+        if (rod.mass() > 0 && rod.massCentreFromCrankPin().isEmpty()) {
+            notes.add(name + ": massCentreFromCrankPin is missing; a third of the rod length is assumed");
+        }
+        if (rod.mass() > 0 && rod.inertia().isEmpty()) {
+            notes.add(name + ": the connecting rod's inertia is missing; that of two lumps at the pins is assumed");
+        }
+        for (int c = 0; c < t.chambers().size(); c++) {
+            Chamber chamber = t.chambers().get(c);
+            for (String note : t.curves().get(c).notes()) {
+                notes.add(chamber.name() + ": " + note);
+            }
+            if (t.curves().get(c).massPerTurn().isEmpty()) {
+                notes.add(chamber.name()
+                        + ": capacity by mass and discharge temperature need a suctionTemperature at the duty point");
+            }
+        }
+        return List.copyOf(notes);
+    }
+}

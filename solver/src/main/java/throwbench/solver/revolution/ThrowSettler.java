@@ -1,0 +1,119 @@
+package throwbench.solver.revolution;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import throwbench.solver.chamber.ChamberCondition;
+import throwbench.solver.chamber.ChamberDuty;
+import throwbench.solver.chamber.ChamberVolume;
+import throwbench.solver.chamber.CycleOutcome;
+import throwbench.solver.chamber.LineConditions;
+import throwbench.solver.chamber.PressureCurve;
+import throwbench.solver.chamber.Side;
+import throwbench.solver.load.ThrowBody;
+import throwbench.solver.machine.Chamber;
+import throwbench.solver.machine.DutyPoint;
+import throwbench.solver.machine.Machine;
+import throwbench.solver.machine.StageConditions;
+import throwbench.solver.machine.Throw;
+import throwbench.solver.mechanism.Linkage;
+
+/** Settles one throw: resolves its defaults and solves its chambers' cycles. */
+final class ThrowSettler {
+
+    private final Machine machine;
+    private final DutyPoint duty;
+    private final int index;
+    private final Throw described;
+    private final List<Refusal> refusals;
+
+    ThrowSettler(Machine machine, DutyPoint duty, int index, List<Refusal> refusals) {
+        this.machine = machine;
+        this.duty = duty;
+        this.index = index;
+        this.described = machine.throwsInOrder().get(index);
+        this.refusals = refusals;
+    }
+
+    Optional<RunningThrow> settle() {
+        List<ChamberVolume> volumes = new ArrayList<>();
+        List<PressureCurve> curves = new ArrayList<>();
+        double uncovered = 0;
+        for (int i = 0; i < described.chambers().size(); i++) {
+            Chamber chamber = described.chambers().get(i);
+            ChamberVolume volume = volume(chamber);
+            volumes.add(volume);
+            solve(i, chamber, volume).ifPresent(curves::add);
+            uncovered += chamber.side() == Side.HEAD ? chamber.area() : -chamber.area();
+        }
+        if (curves.size() < volumes.size()) {
+            return Optional.empty();
+        }
+        ThrowBody body = ThrowBody.of(
+                described.linkage(),
+                described.masses(),
+                described.connectingRod(),
+                described.crank(),
+                described.friction(),
+                described.place().axisDirection(),
+                machine.site().gravityAcceleration());
+        return Optional.of(new RunningThrow(described, body, phase(), volumes, curves, uncovered));
+    }
+
+    private ChamberVolume volume(Chamber chamber) {
+        double stroke = described.linkage().stroke();
+        double swept = chamber.area() * stroke;
+        double clearance = chamber.clearance().volume(swept)
+                + duty.condition(chamber.name()).addedClearance().volume(swept);
+        return new ChamberVolume(chamber.side(), chamber.area(), stroke, clearance);
+    }
+
+    private Optional<PressureCurve> solve(int chamberIndex, Chamber chamber, ChamberVolume volume) {
+        String path = "throws[" + index + "].chambers[" + chamberIndex + "].cycle.kind";
+        if (chamber.stage().isEmpty()) {
+            return refuse(path, "chambers without a stage are not solved by this version");
+        }
+        String stage = chamber.stage().get();
+        StageConditions lines = duty.stages().get(stage);
+        if (lines == null
+                || lines.suctionPressure().isEmpty()
+                || lines.dischargePressure().isEmpty()) {
+            return refuse(
+                    "stages." + stage + ".follows",
+                    "balanced interstage pressures are not solved by this version; give them at the duty point");
+        }
+        ChamberCondition condition = duty.condition(chamber.name());
+        CycleOutcome outcome = chamber.cycle()
+                .solve(new ChamberDuty(
+                        described.linkage(),
+                        machine.drive().rotation(),
+                        volume,
+                        machine.fluidOf(stage),
+                        new LineConditions(
+                                lines.suctionPressure().getAsDouble(),
+                                lines.dischargePressure().getAsDouble(),
+                                lines.suctionTemperature()),
+                        condition,
+                        duty.speed(),
+                        chamber.flowAllowance()));
+        return outcome.curve().isPresent() ? outcome.curve() : refuse(path, outcome.refusal());
+    }
+
+    private Optional<PressureCurve> refuse(String path, String sentence) {
+        refusals.add(new Refusal(path, sentence));
+        return Optional.empty();
+    }
+
+    /** φ of this throw when the first stands at its head-end dead centre. */
+    private double phase() {
+        Throw first = machine.throwsInOrder().get(0);
+        double shaft = pinAngleFromShaft(first, first.linkage());
+        double here = pinAngleFromShaft(described, described.linkage());
+        return machine.drive().rotation().sign() * (shaft - here);
+    }
+
+    /** ψ at which a throw stands at head-end dead centre: θh + γ − δ. */
+    private static double pinAngleFromShaft(Throw t, Linkage linkage) {
+        return linkage.headEndAngle() + t.place().axisDirection() - t.place().crankPhase();
+    }
+}

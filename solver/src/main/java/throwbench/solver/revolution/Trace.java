@@ -1,0 +1,93 @@
+package throwbench.solver.revolution;
+
+import throwbench.solver.mechanism.Angles;
+import throwbench.solver.mechanism.Approach;
+
+/**
+ * A curve sampled once around: equally spaced stations, with both sides of every break angle between them. Sign changes and
+ * extremes are bracketed on the samples and found on the curve itself.
+ */
+public final class Trace {
+
+    /** Enough that a bracket holds one extreme; what is shorter is looked for where the curve comes near to zero. */
+    static final int STATIONS = 720;
+
+    private final Curve curve;
+    private final double[] angles;
+    private final double[] values;
+    /** For each sample, the number of breaks passed: two samples with equal numbers have no break between them. */
+    private final int[] piece;
+
+    /**
+     * @param grid the curve at STATIONS equally spaced angles from 0
+     * @param breaks rad, rising, in [0, 2π)
+     */
+    Trace(Curve curve, double[] grid, double[] breaks) {
+        this.curve = curve;
+        int size = grid.length + 2 * breaks.length + 1;
+        angles = new double[size];
+        values = new double[size];
+        piece = new int[size];
+        int at = 0;
+        int next = 0;
+        double step = Angles.TURN / grid.length;
+        for (int i = 0; i < grid.length; i++) {
+            double angle = i * step;
+            while (next < breaks.length && breaks[next] <= angle + Approach.TOLERANCE) {
+                at = addBreak(at, breaks[next], next);
+                next++;
+            }
+            boolean onBreak = next > 0 && angle - breaks[next - 1] < 2 * Approach.TOLERANCE;
+            if (!onBreak) {
+                at = add(at, angle, grid[i], next);
+            }
+        }
+        while (next < breaks.length) {
+            at = addBreak(at, breaks[next], next);
+            next++;
+        }
+        this.count = closed(at, breaks);
+    }
+
+    private final int count;
+
+    private int addBreak(int at, double angle, int passed) {
+        int next = add(at, angle, curve.at(angle, Approach.JUST_BEFORE), passed);
+        return add(next, angle, curve.at(angle, Approach.JUST_AFTER), passed + 1);
+    }
+
+    private int add(int at, double angle, double value, int passed) {
+        angles[at] = angle;
+        values[at] = value;
+        piece[at] = passed;
+        return at + 1;
+    }
+
+    /** Repeats the first sample a turn later, so that the last piece has its end. */
+    private int closed(int at, double[] breaks) {
+        return add(at, angles[0] + Angles.TURN, values[0], breaks.length);
+    }
+
+    Curve curve() {
+        return curve;
+    }
+
+    /** Number of samples, the first one repeated a turn later. */
+    int count() {
+        return count;
+    }
+
+    /** Crank angle of a sample, rad, in [0, 2π]. */
+    double angle(int sample) {
+        return angles[sample];
+    }
+
+    double value(int sample) {
+        return values[sample];
+    }
+
+    /** Whether the curve is smooth from one sample to a later one. */
+    boolean smooth(int from, int to) {
+        return piece[from] == piece[to];
+    }
+}
