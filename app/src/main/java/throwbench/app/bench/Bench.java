@@ -51,8 +51,7 @@ public final class Bench {
     }
 
     private static Wish wish(Opened opened, Wish.Choice choice) {
-        return new Wish(
-                opened.document(), opened.machine(), choice.within(opened.machine()), OptionalDouble.empty());
+        return new Wish(opened.document(), opened.machine(), choice.within(opened.machine()), OptionalDouble.empty());
     }
 
     /** The state that every view draws. */
@@ -138,7 +137,7 @@ public final class Bench {
                 .ifPresent(r -> status.set(Status.trouble(r.path() + ": " + r.sentence())));
         outcome.shown().ifPresent(next -> {
             Shown before = shown.get();
-            if (next.throwIndex() != before.throwIndex() && next.machine() == before.machine()) {
+            if (next.throwIndex() != before.throwIndex() && next.document().equals(before.document())) {
                 // the machine stands still: only the throw whose angle is told changes
                 playhead.turnBy(next.running().angleBetween(before.throwIndex(), next.throwIndex()));
             }
@@ -202,7 +201,10 @@ public final class Bench {
         List<String> duties = machine.dutyPoints().stream().map(d -> d.name()).toList();
         List<String> names = machine.throwsInOrder().stream().map(t -> t.name()).toList();
         int duty = duties.indexOf(finding.where().duty());
-        int throwIndex = finding.where().throwName().map(names::indexOf).orElse(wish.choice().throwIndex());
+        int throwIndex = finding.where()
+                .throwName()
+                .map(names::indexOf)
+                .orElse(wish.choice().throwIndex());
         if (duty >= 0 && throwIndex >= 0) {
             playhead.setPlaying(false);
             choose(wish.choice().duty(duty).ofThrow(throwIndex), finding.angle());

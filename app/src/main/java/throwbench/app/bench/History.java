@@ -30,7 +30,8 @@ final class History {
         while (steps.size() > at + 1) {
             steps.remove(steps.size() - 1);
         }
-        boolean joined = joins && at > 0 && !path.isEmpty() && steps.get(at).path().equals(path);
+        boolean joined =
+                joins && at > 0 && !path.isEmpty() && steps.get(at).path().equals(path);
         if (joined) {
             steps.set(at, new Step(next, name, path));
         } else {

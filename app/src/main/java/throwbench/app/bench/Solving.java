@@ -2,6 +2,7 @@ package throwbench.app.bench;
 
 import java.util.List;
 import java.util.Optional;
+import throwbench.solver.document.MachineDocument;
 import throwbench.solver.finding.Finding;
 import throwbench.solver.finding.Judgement;
 import throwbench.solver.machine.DutyPoint;
@@ -17,7 +18,7 @@ final class Solving {
     private Optional<Judged> judged = Optional.empty();
 
     /** The last judgement, which holds as long as the machine is the same one. */
-    private record Judged(Object machine, List<Finding> findings) {}
+    private record Judged(MachineDocument document, List<Finding> findings) {}
 
     /** What came of a wish: a state to show, or why its machine cannot be solved. */
     record Outcome(Wish wish, Optional<Shown> shown, List<Refusal> refusals) {}
@@ -46,13 +47,13 @@ final class Solving {
     }
 
     private List<Finding> findings(Wish wish) {
-        Optional<Judged> known = judged.filter(j -> j.machine() == wish.machine());
+        Optional<Judged> known = judged.filter(j -> j.document().equals(wish.document()));
         if (known.isPresent()) {
             return known.get().findings();
         }
         List<Finding> findings =
                 Judgement.of(wish.machine(), wish.machine().dutyPoints()).findings();
-        judged = Optional.of(new Judged(wish.machine(), findings));
+        judged = Optional.of(new Judged(wish.document(), findings));
         return findings;
     }
 }

@@ -73,7 +73,9 @@ public final class BuildSheet extends VBox {
             title.getStyleClass().add("group");
             box.getChildren().add(title);
             for (SheetEntry entry : group.entries()) {
-                if (whole || entry.label().contains(sought) || entry.path().toLowerCase(Locale.ROOT).contains(sought)) {
+                if (whole
+                        || entry.label().contains(sought)
+                        || entry.path().toLowerCase(Locale.ROOT).contains(sought)) {
                     InputField field = new InputField(new FieldInput(bench, entry));
                     fields.add(field);
                     box.getChildren().add(field);

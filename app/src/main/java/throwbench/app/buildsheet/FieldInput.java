@@ -61,14 +61,16 @@ final class FieldInput {
     }
 
     private Dimension clearanceDimension() {
-        QuantityReading asVolume = QuantityText.read(text(), Dimension.VOLUME, bench.document().ambientPressure());
+        QuantityReading asVolume =
+                QuantityText.read(text(), Dimension.VOLUME, bench.document().ambientPressure());
         return asVolume instanceof Quantity ? Dimension.VOLUME : Dimension.SHARE;
     }
 
     /** What the field holds now. */
     Optional<Quantity> present() {
         String text = text().isEmpty() ? otherwise() : text();
-        QuantityReading reading = QuantityText.read(text, dimension(), bench.document().ambientPressure());
+        QuantityReading reading =
+                QuantityText.read(text, dimension(), bench.document().ambientPressure());
         return reading instanceof Quantity quantity ? Optional.of(quantity) : Optional.empty();
     }
 
@@ -86,8 +88,7 @@ final class FieldInput {
             return "";
         }
         PressureMark mark = quantity.mark();
-        return other.show(
-                quantity.value(), dimension(), mark, bench.document().ambientPressure(), DIGITS_BESIDE);
+        return other.show(quantity.value(), dimension(), mark, bench.document().ambientPressure(), DIGITS_BESIDE);
     }
 
     /**
@@ -101,8 +102,11 @@ final class FieldInput {
         }
         QuantityReading reading =
                 TypedValue.read(typed, dimension(), present(), bench.document().ambientPressure());
-        if (dimension() == Dimension.SHARE && reading instanceof Refusal && key().flatMap(Key::dimension).isEmpty()) {
-            reading = TypedValue.read(typed, Dimension.VOLUME, Optional.empty(), bench.document().ambientPressure());
+        if (dimension() == Dimension.SHARE
+                && reading instanceof Refusal
+                && key().flatMap(Key::dimension).isEmpty()) {
+            reading = TypedValue.read(
+                    typed, Dimension.VOLUME, Optional.empty(), bench.document().ambientPressure());
         }
         if (reading instanceof Refusal refusal) {
             return refusal.sentence();

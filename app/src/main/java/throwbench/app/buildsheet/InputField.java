@@ -114,7 +114,8 @@ final class InputField extends VBox {
 
     /** Shows what the machine holds, unless the user is at a value that is wrong or not yet taken. */
     void follow() {
-        boolean untouched = wrong.getText().isEmpty() && !(field.isFocused() && !field.getText().equals(lastShown));
+        boolean untouched = wrong.getText().isEmpty()
+                && !(field.isFocused() && !field.getText().equals(lastShown));
         if (untouched) {
             refresh();
         }
