@@ -1,6 +1,7 @@
 package throwbench.app.bench;
 
 import java.util.List;
+import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.finding.Finding;
 import throwbench.solver.machine.Machine;
 import throwbench.solver.machine.Throw;
@@ -16,8 +17,10 @@ import throwbench.solver.revolution.Summary;
  * @param throwIndex the throw shown
  * @param summary extremes, reversal and stations of the shown throw at that duty point
  * @param findings of every duty point, worst first
+ * @param units in which values are shown
  */
-public record Shown(Machine machine, int dutyIndex, int throwIndex, Summary summary, List<Finding> findings) {
+public record Shown(
+        Machine machine, int dutyIndex, int throwIndex, Summary summary, List<Finding> findings, UnitSystem units) {
 
     public Shown {
         findings = List.copyOf(findings);
