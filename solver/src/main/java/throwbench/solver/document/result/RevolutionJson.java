@@ -129,7 +129,8 @@ public final class RevolutionJson implements Written {
         json.degrees("tensionSpan_deg", reversal.longestSpan(true));
         json.degrees("compressionSpan_deg", reversal.longestSpan(false));
         json.number("tensionPeak_N", reversal.tension().map(Extreme::value).orElse(0.0));
-        json.number("compressionPeak_N", reversal.compression().map(Extreme::value).orElse(0.0));
+        json.number(
+                "compressionPeak_N", reversal.compression().map(Extreme::value).orElse(0.0));
         json.degrees("tensionPeakAt_deg", angle(reversal, true));
         json.degrees("compressionPeakAt_deg", angle(reversal, false));
         json.degrees("duration_deg", reversal.duration());
