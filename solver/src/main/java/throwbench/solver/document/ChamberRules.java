@@ -46,7 +46,7 @@ final class ChamberRules {
             return;
         }
         String held = fluid.get().kind();
-        boolean clash = held.equals("gas") && kind.equals("liquid") || held.equals("liquid") && !kind.equals("liquid");
+        boolean clash = !held.isEmpty() && held.equals("gas") == kind.equals("liquid");
         if (clash) {
             String found =
                     '"' + kind + "\" for the " + held + " \"" + fluid.get().name() + '"';

@@ -45,8 +45,8 @@ final class Checker {
         Key key = schemaOfAmbient();
         Node site = root.member("site");
         Node ambient = site == null ? null : site.member(key.name());
-        boolean given = ambient != null && ambient.type() == Node.Type.TEXT;
-        if (given
+        if (ambient != null
+                && ambient.type() == Node.Type.TEXT
                 && QuantityText.read(ambient.text(), Dimension.GAS_PRESSURE, 0) instanceof Quantity pressure
                 && pressure.mark() == PressureMark.ABSOLUTE
                 && key.range().contains(pressure.value())) {

@@ -46,7 +46,7 @@ final class DutyRules {
         boolean flow = roster.chambersOf(stage).stream()
                 .anyMatch(chamber -> Roster.cycleOf(chamber).equals("valve-flow"));
         boolean mixture = fluid.isPresent() && fluid.get().has("mixture");
-        if (mixture || flow && fluid.isPresent()) {
+        if (mixture || (flow && fluid.isPresent())) {
             String wanted = "a temperature, as \"32 degC\", for a " + (mixture ? "mixture" : "flow through valves");
             conditions.fault("suctionTemperature", FaultList.MISSING, wanted);
         }

@@ -46,9 +46,9 @@ final class Fields {
         return Objects.requireNonNull(node).name();
     }
 
-    /** The word of its kind; empty where it has none. */
+    /** The word of its kind; empty where it has none that the page knows. */
     String kind() {
-        return Checker.word(node);
+        return children.isEmpty() ? "" : Checker.word(node);
     }
 
     /** Its node, which the file must have. */

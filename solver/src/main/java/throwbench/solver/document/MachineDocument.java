@@ -149,7 +149,7 @@ public final class MachineDocument {
             return withJson(path.parent(), wrapped);
         }
         boolean fits = above.type() == (last.isIndex() ? Node.Type.LIST : Node.Type.OBJECT);
-        if (!fits || last.isIndex() && last.index() != above.members().size()) {
+        if (!fits || (last.isIndex() && last.index() != above.members().size())) {
             throw new IllegalArgumentException("nothing can stand at " + path);
         }
         int end = above.members().size();

@@ -1,6 +1,7 @@
 package throwbench.solver.document;
 
-import java.util.Arrays;
+import java.util.ArrayList;
+import java.util.List;
 import throwbench.solver.chamber.RecordedPressure;
 import throwbench.solver.document.AttachedFiles.Attached;
 import throwbench.solver.document.quantity.NumberText;
@@ -16,9 +17,8 @@ final class RecordedTable {
 
     private final String file;
     private final String text;
-    private double[] angles = new double[256];
-    private double[] pressures = new double[256];
-    private int rows;
+    private final List<Double> angles = new ArrayList<>();
+    private final List<Double> pressures = new ArrayList<>();
     private int line;
 
     private RecordedTable(String file, String text) {
@@ -47,11 +47,11 @@ final class RecordedTable {
                 return Attached.refused("line " + line + " of " + file + ": " + QuantityText.quoted(row), wanted);
             }
         }
-        if (rows < FEWEST_ROWS) {
-            String found = line == 0 ? "an empty file " + file : rows + " rows in " + file;
+        if (angles.size() < FEWEST_ROWS) {
+            String found = line == 0 ? "an empty file " + file : angles.size() + " rows in " + file;
             return Attached.refused(found, line == 0 ? WANTED : "at least " + FEWEST_ROWS);
         }
-        return Attached.of(new RecordedPressure(file, Arrays.copyOf(angles, rows), Arrays.copyOf(pressures, rows)));
+        return Attached.of(new RecordedPressure(file, angles, pressures));
     }
 
     private static String header(String row) {
@@ -72,22 +72,14 @@ final class RecordedTable {
             return "a crank angle from 0 to below 360";
         }
         double radians = Math.toRadians(degrees);
-        if (rows > 0 && !(radians > angles[rows - 1])) {
+        if (!angles.isEmpty() && !(radians > angles.get(angles.size() - 1))) {
             return "a crank angle above that of the row before";
         }
         if (!(pascal > 0 && pascal <= Double.MAX_VALUE)) {
             return "an absolute pressure above 0";
         }
-        take(radians, pascal);
+        angles.add(radians);
+        pressures.add(pascal);
         return "";
-    }
-
-    private void take(double angle, double pressure) {
-        if (rows == angles.length) {
-            angles = Arrays.copyOf(angles, 2 * rows);
-            pressures = Arrays.copyOf(pressures, 2 * rows);
-        }
-        angles[rows] = angle;
-        pressures[rows++] = pressure;
     }
 }

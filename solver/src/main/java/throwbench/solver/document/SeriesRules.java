@@ -19,11 +19,13 @@ final class SeriesRules {
         for (Map.Entry<String, Fields> stage : roster.stages().entrySet()) {
             Set<String> chain = new HashSet<>();
             String at = stage.getKey();
-            while (roster.stages().containsKey(at) && !settled.contains(at) && chain.add(at)) {
-                at = roster.stages().get(at).given("follows").orElse("");
+            Fields link = stage.getValue();
+            while (link != null && !settled.contains(at) && chain.add(at)) {
+                at = link.given("follows").orElse("");
+                link = roster.stages().get(at);
             }
-            if (chain.contains(at)) {
-                roster.stages().get(at).fault("follows", "stages that follow each other in a ring", "a first stage");
+            if (link != null && chain.contains(at)) {
+                link.fault("follows", "stages that follow each other in a ring", "a first stage");
             }
             settled.addAll(chain);
         }

@@ -14,8 +14,8 @@ public record Flaw(int offset, String path, String found, String wanted) {
         int lineStart = 0;
         for (int at = 0; at < Math.min(offset, text.length()); at++) {
             char c = text.charAt(at);
-            boolean ends = c == '\n' || c == '\r' && !(at + 1 < text.length() && text.charAt(at + 1) == '\n');
-            if (ends) {
+            boolean beforeLineFeed = at + 1 < text.length() && text.charAt(at + 1) == '\n';
+            if (c == '\n' || (c == '\r' && !beforeLineFeed)) {
                 line++;
                 lineStart = at + 1;
             }

@@ -33,7 +33,8 @@ public record Range(double least, boolean leastIn, double greatest, boolean grea
 
     /** Whether a value lies within. */
     public boolean contains(double value) {
-        return (value > least || leastIn && value == least) && (value < greatest || greatestIn && value == greatest);
+        boolean highEnough = leastIn ? value >= least : value > least;
+        return highEnough && (greatestIn ? value <= greatest : value < greatest);
     }
 
     /** For sentences: "above 0 and below 1"; empty where every value is allowed. */
