@@ -115,7 +115,8 @@ final class Arguments {
         if (words.contains(given)) {
             return Optional.of(given);
         }
-        terminal.complain("throwbench", option.word(), "\"" + given + "\", " + String.join(" or ", words) + " is wanted");
+        terminal.complain(
+                "throwbench", option.word(), "\"" + given + "\", " + String.join(" or ", words) + " is wanted");
         return Optional.empty();
     }
 }

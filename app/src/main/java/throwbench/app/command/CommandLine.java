@@ -74,7 +74,8 @@ public final class CommandLine {
         }
         List<String> rest = words.subList(1, words.size());
         if (rest.contains("--help") || rest.contains("-h")) {
-            return print("throwbench " + command.get().synopsis() + "\n\n" + command.get().help());
+            return print("throwbench " + command.get().synopsis() + "\n\n"
+                    + command.get().help());
         }
         Optional<Arguments> arguments = Arguments.read(command.get(), rest, terminal);
         return arguments.isPresent() ? command.get().run(arguments.get(), terminal) : ExitCode.REFUSED;
@@ -88,7 +89,8 @@ public final class CommandLine {
         if (source.isEmpty()) {
             return ExitCode.REFUSED;
         }
-        ExitCode judged = CheckCommand.judge(source.get(), source.get().machine().dutyPoints(), "text", terminal);
+        ExitCode judged =
+                CheckCommand.judge(source.get(), source.get().machine().dutyPoints(), "text", terminal);
         return judged == ExitCode.NOT_MET ? ExitCode.DONE : judged;
     }
 

@@ -114,7 +114,9 @@ record FindingGroup(List<Finding> findings) {
     private static String names(List<Finding> some) {
         StringBuilder text = new StringBuilder();
         for (int i = 0; i < some.size() && i < NAMED; i++) {
-            text.append(i == 0 ? "\"" : ", \"").append(some.get(i).where().duty()).append('"');
+            text.append(i == 0 ? "\"" : ", \"")
+                    .append(some.get(i).where().duty())
+                    .append('"');
         }
         return some.size() > NAMED ? text + " and " + (some.size() - NAMED) + " more" : text.toString();
     }
@@ -132,6 +134,7 @@ record FindingGroup(List<Finding> findings) {
         }
         Readable read = Readable.of(value.getAsDouble(), criterion().unit(), value.getAsDouble());
         return "the greatest of " + findings.size() + " duty points; the least is "
-                + (read.number() + " " + read.unit()).strip() + " at \"" + least.where().duty() + "\"";
+                + (read.number() + " " + read.unit()).strip() + " at \""
+                + least.where().duty() + "\"";
     }
 }

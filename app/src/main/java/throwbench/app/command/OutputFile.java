@@ -104,7 +104,8 @@ final class OutputFile {
     }
 
     private static void writeInto(Written text, Path file) throws IOException {
-        try (OutputStream out = Files.newOutputStream(file, StandardOpenOption.WRITE, StandardOpenOption.TRUNCATE_EXISTING)) {
+        try (OutputStream out =
+                Files.newOutputStream(file, StandardOpenOption.WRITE, StandardOpenOption.TRUNCATE_EXISTING)) {
             text.writeTo(out);
         }
     }
