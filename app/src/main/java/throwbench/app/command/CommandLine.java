@@ -115,8 +115,8 @@ public final class CommandLine {
         List<String> known = word.startsWith("-") ? List.of("--help", "--version") : names;
         List<String> near = NearWords.of(word, known);
         return (word.startsWith("-") ? "no such option" : "no such command")
-                + (near.isEmpty() ? "; there is " : "; perhaps ")
-                + String.join(near.isEmpty() ? ", " : " or ", near.isEmpty() ? known : near);
+                + (near.isEmpty() ? "; there are " : "; perhaps ")
+                + String.join(near.isEmpty() ? " and " : " or ", near.isEmpty() ? known : near);
     }
 
     private String overview() {
@@ -127,7 +127,8 @@ public final class CommandLine {
                     opens the window on a machine, or on a sample
                 """);
         for (Command command : commands) {
-            text.append("throwbench ").append(command.synopsis()).append('\n');
+            String synopsis = String.join("\n", TextColumns.wrap("throwbench " + command.synopsis(), 8));
+            text.append(synopsis.stripLeading()).append('\n');
             text.append("    ").append(command.help(), 0, command.help().indexOf('\n') + 1);
         }
         return text.append("""

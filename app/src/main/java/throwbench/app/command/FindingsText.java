@@ -104,7 +104,7 @@ final class FindingsText implements Written {
         long failed = judged.stream().filter(f -> f.verdict() == Verdict.NOT_MET).count();
         Finding worst = judged.get(0);
         String before = failed == 0
-                ? "All " + judged.size() + " judged findings are met; nearest to its limit: "
+                ? "All " + judged.size() + " judged findings are met; closest: "
                 : failed + " of " + judged.size() + " judged findings " + (failed == 1 ? "is" : "are") + " not met; worst: ";
         String after = ", " + Row.margin(worst) + ".";
         String what = worst.criterion().title() + " of " + FindingGroup.subject(worst.where())
