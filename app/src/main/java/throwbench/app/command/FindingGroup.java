@@ -115,7 +115,9 @@ record FindingGroup(List<Finding> findings) {
     private static String names(List<Finding> some) {
         StringBuilder text = new StringBuilder();
         for (int i = 0; i < some.size() && i < NAMED; i++) {
-            text.append(i == 0 ? "\"" : ", \"").append(some.get(i).where().duty()).append('"');
+            text.append(i == 0 ? "\"" : ", \"")
+                    .append(some.get(i).where().duty())
+                    .append('"');
         }
         return some.size() > NAMED ? text + " and " + (some.size() - NAMED) + " more" : text.toString();
     }
@@ -132,7 +134,7 @@ record FindingGroup(List<Finding> findings) {
             return value.isEmpty() ? "" : "the same at all " + findings.size() + " duty points";
         }
         Readable read = Readable.of(value.getAsDouble(), criterion().unit(), value.getAsDouble());
-        return "least of " + findings.size() + " duty points: "
-                + (read.number() + " " + read.unit()).strip() + " at \"" + least.where().duty() + "\"";
+        return "least of " + findings.size() + " duty points: " + (read.number() + " " + read.unit()).strip() + " at \""
+                + least.where().duty() + "\"";
     }
 }

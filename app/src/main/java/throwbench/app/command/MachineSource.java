@@ -42,9 +42,7 @@ final class MachineSource {
             terminal.complain(file, fault.line());
         }
         Optional<Machine> machine = reading.machine();
-        return machine.isPresent()
-                ? Optional.of(new MachineSource(file, machine.get(), terminal))
-                : Optional.empty();
+        return machine.isPresent() ? Optional.of(new MachineSource(file, machine.get(), terminal)) : Optional.empty();
     }
 
     Machine machine() {

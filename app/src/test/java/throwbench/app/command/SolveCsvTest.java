@@ -71,7 +71,8 @@ class SolveCsvTest {
     @Test
     void chamberNamesWithCommasAndQuotesAreQuoted() throws IOException {
         Path file = Run.machine(folder, "\"A head\"", "\"A \\\"head\\\", outer\"");
-        String header = Run.of("solve", file.toString()).out().lines().findFirst().orElseThrow();
+        String header =
+                Run.of("solve", file.toString()).out().lines().findFirst().orElseThrow();
 
         // RFC 4180, 2.6 and 2.7
         assertEquals(HEADER.replace("pressure_Pa[A head]", "\"pressure_Pa[A \"\"head\"\", outer]\""), header);
@@ -81,8 +82,11 @@ class SolveCsvTest {
     void bothEndsOfTheRangeOfStationsAreSolved() throws IOException {
         String file = Run.machine(folder).toString();
 
-        assertEquals(1 + 8, Run.of("solve", file, "--stations", "8").out().lines().count());
-        assertEquals(1 + 36000, Run.of("solve", file, "--stations", "36000").out().lines().count());
+        assertEquals(
+                1 + 8, Run.of("solve", file, "--stations", "8").out().lines().count());
+        assertEquals(
+                1 + 36000,
+                Run.of("solve", file, "--stations", "36000").out().lines().count());
     }
 
     @Test

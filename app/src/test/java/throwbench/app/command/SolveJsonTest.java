@@ -83,7 +83,10 @@ class SolveJsonTest {
     void columnsAreThoseOfTheCsv() throws IOException {
         Path file = Run.machine(folder);
         JsonNode columns = solve(file, "--stations", "24").get("columns");
-        List<String> lines = Run.of("solve", file.toString(), "--stations", "24").out().lines().toList();
+        List<String> lines = Run.of("solve", file.toString(), "--stations", "24")
+                .out()
+                .lines()
+                .toList();
 
         assertEquals(List.of(lines.get(0).split(",")), keys(columns));
         for (int i = 0; i < 24; i++) {
@@ -108,12 +111,18 @@ class SolveJsonTest {
         assertEquals("normal", root.get("duty").textValue());
         assertEquals("A", root.get("throw").textValue());
         assertEquals(8, root.get("stations").intValue());
-        assertEquals(expected.shownThrow().linkage().stroke(), summary.get("stroke_m").doubleValue(), 0);
+        assertEquals(
+                expected.shownThrow().linkage().stroke(),
+                summary.get("stroke_m").doubleValue(),
+                0);
         assertEquals(180, summary.get("crankEndDeadCentre_deg").doubleValue(), 1e-12);
         assertEquals(1, summary.get("timeRatio").doubleValue(), 1e-12);
-        assertEquals(expected.meanThrowTorque(), summary.get("meanThrowTorque_N_m").doubleValue(), 0);
-        assertEquals(expected.meanShaftTorque(), summary.get("meanShaftTorque_N_m").doubleValue(), 0);
-        assertEquals(expected.speedFluctuation(), summary.get("speedFluctuation").doubleValue(), 0);
+        assertEquals(
+                expected.meanThrowTorque(), summary.get("meanThrowTorque_N_m").doubleValue(), 0);
+        assertEquals(
+                expected.meanShaftTorque(), summary.get("meanShaftTorque_N_m").doubleValue(), 0);
+        assertEquals(
+                expected.speedFluctuation(), summary.get("speedFluctuation").doubleValue(), 0);
         double power = summary.get("indicatedPower_W").get("first").doubleValue();
         assertEquals(expected.throwFlow().indicatedPower().get("first"), power, 0);
         assertEquals(
@@ -163,7 +172,8 @@ class SolveJsonTest {
         Path file = Run.machine(folder);
         RunningMachine running = SampleMachine.running(file, 1);
         Reversal expected = Summary.of(running, 0, Optional.empty()).reversal();
-        JsonNode reversal = solve(file, "--duty", "crank end unloaded").get("summary").get("reversal");
+        JsonNode reversal =
+                solve(file, "--duty", "crank end unloaded").get("summary").get("reversal");
 
         assertEquals(2, reversal.get("signChanges_deg").size());
         for (int i = 0; i < 2; i++) {
@@ -176,12 +186,16 @@ class SolveJsonTest {
         double tension = reversal.get("tensionSpan_deg").doubleValue();
         double compression = reversal.get("compressionSpan_deg").doubleValue();
         assertEquals(360, tension + compression, 1e-9);
-        assertEquals(Math.min(tension, compression), reversal.get("duration_deg").doubleValue(), 0);
+        assertEquals(
+                Math.min(tension, compression), reversal.get("duration_deg").doubleValue(), 0);
         double pull = reversal.get("tensionPeak_N").doubleValue();
         double push = reversal.get("compressionPeak_N").doubleValue();
         assertEquals(expected.tension().orElseThrow().value(), pull, 0);
         assertEquals(expected.compression().orElseThrow().value(), push, 0);
-        assertEquals(Math.min(pull, push) / Math.max(pull, push), reversal.get("ratio").doubleValue(), 1e-15);
+        assertEquals(
+                Math.min(pull, push) / Math.max(pull, push),
+                reversal.get("ratio").doubleValue(),
+                1e-15);
         assertEquals(
                 Math.toDegrees(expected.tension().orElseThrow().crankAngle()),
                 reversal.get("tensionPeakAt_deg").doubleValue(),
@@ -196,8 +210,7 @@ class SolveJsonTest {
     void aLoadThatNeverPullsHasNoAngleOfItsPeakAndANoteSaysSo() throws IOException {
         // a small head end alone against a high pressure, at a crawl: the gas always pushes
         Path file = Run.machine(folder, "\"speed\": \"740 rpm\"", "\"speed\": \"1 rpm\"");
-        Path pushed = Run.machineWith(file, text -> text.replaceFirst(
-                        "(?s)\\{ \"name\": \"A head\".*?\\} \\},\\s*", "")
+        Path pushed = Run.machineWith(file, text -> text.replaceFirst("(?s)\\{ \"name\": \"A head\".*?\\} \\},\\s*", "")
                 .replace("\"side\": \"crank\"", "\"side\": \"head\"")
                 .replace(", \"A head\": { \"addedClearance\": \"20 %\" }", ""));
         JsonNode summary = solve(pushed).get("summary");
@@ -236,7 +249,8 @@ class SolveJsonTest {
 
         assertEquals(List.of("A head", "A crank"), keys(events));
         for (int c = 0; c < 2; c++) {
-            List<ValveEvent> expected = running.throwsInOrder().get(0).curves().get(c).events();
+            List<ValveEvent> expected =
+                    running.throwsInOrder().get(0).curves().get(c).events();
             JsonNode written = events.get(keys(events).get(c));
             assertEquals(4, written.size());
             for (int i = 0; i < 4; i++) {
@@ -262,7 +276,8 @@ class SolveJsonTest {
         JsonNode fine = solve(file, "--stations", "720").get("summary");
 
         assertEquals(fine.get("reversal"), coarse.get("reversal"));
-        assertEquals(fine.get("extremes").get("rod_load_N"), coarse.get("extremes").get("rod_load_N"));
+        assertEquals(
+                fine.get("extremes").get("rod_load_N"), coarse.get("extremes").get("rod_load_N"));
     }
 
     @Test
