@@ -16,6 +16,8 @@ import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
 import java.nio.file.attribute.PosixFileAttributeView;
 import java.util.Set;
+import throwbench.solver.document.attached.AttachedFiles;
+import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.json.JsonText;
 
 /** Machine files on disk. */

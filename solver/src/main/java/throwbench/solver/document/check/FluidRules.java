@@ -1,4 +1,4 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
 import throwbench.solver.document.json.Node;
 import throwbench.solver.document.quantity.NumberText;
@@ -28,7 +28,7 @@ final class FluidRules {
 
     private static void missing(Fields fluid, String name, String example) {
         if (!fluid.has(name)) {
-            fluid.fault(name, FaultList.MISSING, example + " or the like, or a mixture");
+            fluid.fault(name, FlawList.MISSING, example + " or the like, or a mixture");
         }
     }
 

@@ -1,4 +1,4 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
 /** The names that a mixture's gases may have. */
 @FunctionalInterface

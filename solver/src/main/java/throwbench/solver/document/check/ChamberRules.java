@@ -1,8 +1,9 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
 import java.util.Optional;
 import java.util.OptionalDouble;
-import throwbench.solver.document.AttachedFiles.Attached;
+import throwbench.solver.document.attached.AttachedFiles;
+import throwbench.solver.document.attached.AttachedFiles.Attached;
 import throwbench.solver.document.quantity.Refusal;
 
 /** A chamber's diameters, and what its cycle needs. */
@@ -27,7 +28,7 @@ final class ChamberRules {
 
     private static void missing(Fields chamber, String name, String wanted) {
         if (!chamber.has(name)) {
-            chamber.fault(name, FaultList.MISSING, wanted);
+            chamber.fault(name, FlawList.MISSING, wanted);
         }
     }
 

@@ -1,4 +1,4 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
 import java.util.ArrayList;
 import java.util.EnumMap;
@@ -25,11 +25,12 @@ import throwbench.solver.machine.Throw;
 import throwbench.solver.mechanism.Rotation;
 
 /** Makes the machine of a file without faults. */
-final class MachineBuilder {
+public final class MachineBuilder {
 
     private MachineBuilder() {}
 
-    static Machine build(Checked checked) {
+    /** The machine; the file must have no flaw. */
+    public static Machine build(Checked checked) {
         Fields file = Fields.root(checked);
         Drive drive = drive(file.object("drive"));
         DutyBuilder duty = new DutyBuilder(drive.speed());

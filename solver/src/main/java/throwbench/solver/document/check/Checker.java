@@ -1,12 +1,13 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
 import java.util.OptionalDouble;
-import org.jspecify.annotations.Nullable;
+import throwbench.solver.document.json.Flaw;
 import throwbench.solver.document.json.Node;
+import throwbench.solver.document.json.Parsed;
 import throwbench.solver.document.quantity.Dimension;
 import throwbench.solver.document.quantity.PressureMark;
 import throwbench.solver.document.quantity.Quantity;
@@ -17,10 +18,10 @@ import throwbench.solver.document.schema.NameSpace;
 import throwbench.solver.document.schema.Schema;
 
 /** Walks a file's tree beside the schema: every value by itself, and every name. */
-final class Checker {
+public final class Checker {
 
     private final Checked checked;
-    private final FaultList faults;
+    private final FlawList flaws;
     private final GasNames gases;
     private final List<Reference> references = new ArrayList<>();
 
@@ -28,20 +29,26 @@ final class Checker {
 
     private Checker(Checked checked, GasNames gases) {
         this.checked = checked;
-        this.faults = checked.faults();
+        this.flaws = checked.flaws();
         this.gases = gases;
     }
 
-    static Checked check(Node root, int count, GasNames gases) {
-        Checked checked = new Checked(root, count, ambientPressure(root));
+    /** Judges every value by itself; the flaws of the text as JSON are taken along. */
+    public static Checked check(Parsed parsed, GasNames gases) {
+        Node root = parsed.root().orElseThrow();
+        Checked checked = new Checked(root, parsed.count(), ambientPressure(root));
         Checker checker = new Checker(checked, gases);
+        parsed.flaws().forEach(checked.flaws()::add);
         checker.walk(Schema.root(), root);
         checker.references.forEach(checker::resolve);
         return checked;
     }
 
-    /** Read before all else: every gauge pressure counts from it, wherever it stands in the file. */
-    static double ambientPressure(Node root) {
+    /**
+     * The site's ambient pressure, Pa absolute, or the default where the file has none that can be read. Read before all
+     * else: every gauge pressure counts from it, wherever it stands in the file.
+     */
+    public static double ambientPressure(Node root) {
         Key key = schemaOfAmbient();
         Node site = root.member("site");
         Node ambient = site == null ? null : site.member(key.name());
@@ -62,12 +69,6 @@ final class Checker {
 
     private static Key child(Key object, String name) {
         return Objects.requireNonNull(object.children("").get(name));
-    }
-
-    /** The word of an object's kind; empty where it has none. */
-    static String word(@Nullable Node object) {
-        Node kind = object == null ? null : object.member("kind");
-        return kind == null || kind.type() != Node.Type.TEXT ? "" : kind.text();
     }
 
     private void walk(Key key, Node node) {
@@ -94,7 +95,7 @@ final class Checker {
         if (node.type() == type) {
             return true;
         }
-        faults.add(node, Said.node(node), key.kind().said());
+        flaws.add(node, Said.node(node), key.kind().said());
         return false;
     }
 
@@ -102,7 +103,7 @@ final class Checker {
         for (Node member : object.members()) {
             Key child = children.get(member.name());
             if (child == null) {
-                faults.add(member, "an unknown key", "one of " + String.join(", ", children.keySet()));
+                flaws.add(member, "an unknown key", "one of " + String.join(", ", children.keySet()));
             } else if (!member.isRepeated()) {
                 walk(child, member);
             }
@@ -128,19 +129,19 @@ final class Checker {
             missing(child, above, path + '.' + child.name());
         }
         if (deeper.isEmpty()) {
-            faults.add(above.start(), new Fault(path, FaultList.MISSING, Said.wanted(key)));
+            flaws.add(new Flaw(above.start(), path, FlawList.MISSING, Said.wanted(key)));
         }
     }
 
     private void variant(Key key, Node object) {
-        String word = word(object);
+        String word = object.text("kind");
         if (key.variants().contains(word)) {
             fields(key.children(word), object);
             return;
         }
         String wanted = "one of " + String.join(", ", key.variants());
         Node kind = object.member("kind");
-        faults.add(object, "kind", kind == null ? FaultList.MISSING : Said.node(kind), wanted);
+        flaws.add(object, "kind", kind == null ? FlawList.MISSING : Said.node(kind), wanted);
     }
 
     private void list(Key key, Node node) {
@@ -148,7 +149,7 @@ final class Checker {
             return;
         }
         if (node.members().size() < key.leastItems()) {
-            faults.add(node, "an empty list", "at least one");
+            flaws.add(node, "an empty list", "at least one");
         }
         for (Node item : node.members()) {
             walk(key.item(), item);
@@ -159,8 +160,8 @@ final class Checker {
         if (!is(Node.Type.LIST, node, key)) {
             return;
         }
-        if (node.members().size() != key.leastItems()) {
-            faults.add(node, "a list of " + node.members().size(), key.kind().said());
+        if (node.members().size() != 2) {
+            flaws.add(node, "a list of " + node.members().size(), key.kind().said());
             return;
         }
         for (Node end : node.members()) {
@@ -169,7 +170,7 @@ final class Checker {
         OptionalDouble least = value(node.members().get(0));
         OptionalDouble greatest = value(node.members().get(1));
         if (least.isPresent() && greatest.isPresent() && least.getAsDouble() > greatest.getAsDouble()) {
-            faults.add(
+            flaws.add(
                     node,
                     Said.node(node.members().get(0)) + " before "
                             + Said.node(node.members().get(1)),
@@ -190,7 +191,7 @@ final class Checker {
                 continue;
             }
             if (member.name().isBlank()) {
-                faults.add(member, "a name of nothing", "a name");
+                flaws.add(member, "a name of nothing", "a name");
             }
             key.declares().ifPresent(space -> checked.declare(space, member.name(), member));
             key.refersTo().ifPresent(space -> references.add(new Reference(member, member.name(), space)));
@@ -230,13 +231,13 @@ final class Checker {
         key.refersTo().ifPresent(space -> references.add(new Reference(node, node.text(), space)));
         key.declares().ifPresent(space -> {
             if (!checked.declare(space, node.text(), node)) {
-                faults.add(node, Said.node(node) + " a second time", "a name of its own for each " + space.said());
+                flaws.add(node, Said.node(node) + " a second time", "a name of its own for each " + space.said());
             }
         });
     }
 
     private void wrong(Key key, Node node) {
-        faults.add(node, Said.node(node), Said.wanted(key));
+        flaws.add(node, Said.node(node), Said.wanted(key));
     }
 
     private void resolve(Reference reference) {
@@ -245,7 +246,7 @@ final class Checker {
                 space == NameSpace.GAS ? gases.knows(reference.name()) : checked.isDeclared(space, reference.name());
         if (!known) {
             String found = "the unknown " + space.said() + ' ' + QuantityText.quoted(reference.name());
-            faults.add(reference.at(), found, "the name of a " + space.said());
+            flaws.add(reference.at(), found, "the name of a " + space.said());
         }
     }
 }

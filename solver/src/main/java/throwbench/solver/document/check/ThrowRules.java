@@ -1,4 +1,4 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
 import java.util.OptionalDouble;
 import throwbench.solver.document.quantity.NumberText;

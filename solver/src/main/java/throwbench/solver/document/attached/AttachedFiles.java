@@ -1,4 +1,4 @@
-package throwbench.solver.document;
+package throwbench.solver.document.attached;
 
 import java.nio.file.Path;
 import java.util.Map;

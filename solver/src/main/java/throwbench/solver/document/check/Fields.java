@@ -1,4 +1,4 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
 import java.util.ArrayList;
 import java.util.List;
@@ -32,7 +32,7 @@ final class Fields {
     /** What is no object is read as if it were not there; it has its fault already. */
     private static Fields of(Checked checked, @Nullable Node node, Key key) {
         boolean there = node != null && node.type() == Node.Type.OBJECT;
-        String word = key.kind() == Kind.VARIANT ? Checker.word(node) : "";
+        String word = node != null && key.kind() == Kind.VARIANT ? node.text("kind") : "";
         return new Fields(checked, there ? node : null, key.children(word));
     }
 
@@ -48,7 +48,7 @@ final class Fields {
 
     /** The word of its kind; empty where it has none that the page knows. */
     String kind() {
-        return children.isEmpty() ? "" : Checker.word(node);
+        return node == null || children.isEmpty() ? "" : node.text("kind");
     }
 
     /** Its node, which the file must have. */
@@ -160,6 +160,6 @@ final class Fields {
     }
 
     void fault(String name, String found, String wanted) {
-        checked.faults().add(node(), name, found, wanted);
+        checked.flaws().add(node(), name, found, wanted);
     }
 }

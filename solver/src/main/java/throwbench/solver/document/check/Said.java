@@ -1,4 +1,4 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
 import throwbench.solver.document.json.Node;
 import throwbench.solver.document.quantity.QuantityText;

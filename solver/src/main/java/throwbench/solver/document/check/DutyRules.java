@@ -1,4 +1,4 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -27,8 +27,8 @@ final class DutyRules {
         if (used && stages != null && stages.type() == Node.Type.OBJECT && stages.member(stage) == null) {
             String user = roster.chambersOf(stage).get(0).text("name");
             point.checked()
-                    .faults()
-                    .add(stages, stage, FaultList.MISSING, "the pressures of the stage that " + user + " uses");
+                    .flaws()
+                    .add(stages, stage, FlawList.MISSING, "the pressures of the stage that " + user + " uses");
         }
         if (!conditions.isThere()) {
             return;
@@ -48,7 +48,7 @@ final class DutyRules {
         boolean mixture = fluid.isPresent() && fluid.get().has("mixture");
         if (mixture || (flow && fluid.isPresent())) {
             String wanted = "a temperature, as \"32 degC\", for a " + (mixture ? "mixture" : "flow through valves");
-            conditions.fault("suctionTemperature", FaultList.MISSING, wanted);
+            conditions.fault("suctionTemperature", FlawList.MISSING, wanted);
         }
     }
 
@@ -121,7 +121,7 @@ final class DutyRules {
             condition.fault("state", found, "a failed valve only with the cycle valve-flow");
         }
         if (failed && !condition.has("leakArea")) {
-            condition.fault("leakArea", FaultList.MISSING, "the effective area of the leak, as \"2.5 cm2\"");
+            condition.fault("leakArea", FlawList.MISSING, "the effective area of the leak, as \"2.5 cm2\"");
         }
     }
 

@@ -1,4 +1,4 @@
-package throwbench.solver.document;
+package throwbench.solver.document.attached;
 
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;

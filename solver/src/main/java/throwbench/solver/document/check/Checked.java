@@ -1,6 +1,5 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
-import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.List;
@@ -8,14 +7,14 @@ import java.util.Map;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import throwbench.solver.chamber.RecordedPressure;
+import throwbench.solver.document.json.Flaw;
 import throwbench.solver.document.json.Node;
-import throwbench.solver.document.quantity.Dimension;
 import throwbench.solver.document.quantity.Quantity;
 import throwbench.solver.document.schema.Key;
 import throwbench.solver.document.schema.NameSpace;
 
-/** A file's tree with what each value means, as far as it means anything, and the faults found on the way. */
-final class Checked {
+/** A file's tree with what each value means, as far as it means anything, and the flaws found on the way. */
+public final class Checked {
 
     private final Node root;
     private final double ambientPressure;
@@ -23,7 +22,7 @@ final class Checked {
     private final @Nullable Quantity[] quantities;
     private final Map<NameSpace, Map<String, Node>> names = new EnumMap<>(NameSpace.class);
     private final Map<Node, RecordedPressure> recordings = new HashMap<>();
-    private final FaultList faults = new FaultList();
+    private final FlawList flaws = new FlawList();
 
     Checked(Node root, int count, double ambientPressure) {
         this.root = root;
@@ -40,8 +39,13 @@ final class Checked {
         return ambientPressure;
     }
 
-    FaultList faults() {
-        return faults;
+    /** All that is wrong, in the order of the file. */
+    public List<Flaw> flawsInOrder() {
+        return flaws.inOrder();
+    }
+
+    FlawList flaws() {
+        return flaws;
     }
 
     void know(Node node, Key key) {
@@ -49,8 +53,7 @@ final class Checked {
     }
 
     /** What the page says of a value; null where it knows no such key. */
-    @Nullable
-    Key key(Node node) {
+    public @Nullable Key key(Node node) {
         return keys[node.serial()];
     }
 
@@ -59,7 +62,7 @@ final class Checked {
     }
 
     /** The quantity at a node, where there is one within its range. */
-    Optional<Quantity> quantity(Node node) {
+    public Optional<Quantity> quantity(Node node) {
         return Optional.ofNullable(quantities[node.serial()]);
     }
 
@@ -80,29 +83,5 @@ final class Checked {
     boolean isDeclared(NameSpace space, String name) {
         Map<String, Node> declared = names.get(space);
         return declared != null && declared.containsKey(name);
-    }
-
-    List<NumericKey> numericKeys() {
-        List<NumericKey> found = new ArrayList<>();
-        collect(root, KeyPath.ROOT, found);
-        return found;
-    }
-
-    private void collect(Node nest, KeyPath path, List<NumericKey> found) {
-        for (Node node : nest.members()) {
-            KeyPath own = nest.type() == Node.Type.LIST ? path.item(node.place()) : path.key(node.name());
-            Quantity quantity = quantities[node.serial()];
-            Key key = keys[node.serial()];
-            if (quantity != null && key != null) {
-                found.add(new NumericKey(own, key.dimension().orElse(dimension(quantity)), quantity));
-            }
-            if (!node.isRepeated()) {
-                collect(node, own, found);
-            }
-        }
-    }
-
-    private static Dimension dimension(Quantity clearance) {
-        return Dimension.SHARE.holds(clearance.unit()) ? Dimension.SHARE : Dimension.VOLUME;
     }
 }

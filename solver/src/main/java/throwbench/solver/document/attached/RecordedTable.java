@@ -1,9 +1,9 @@
-package throwbench.solver.document;
+package throwbench.solver.document.attached;
 
 import java.util.ArrayList;
 import java.util.List;
 import throwbench.solver.chamber.RecordedPressure;
-import throwbench.solver.document.AttachedFiles.Attached;
+import throwbench.solver.document.attached.AttachedFiles.Attached;
 import throwbench.solver.document.quantity.NumberText;
 import throwbench.solver.document.quantity.QuantityText;
 

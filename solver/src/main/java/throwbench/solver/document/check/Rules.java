@@ -1,13 +1,15 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
+import throwbench.solver.document.attached.AttachedFiles;
 import throwbench.solver.document.quantity.PressureMark;
 
 /** What the page says of several keys together. Each value has been judged by itself before. */
-final class Rules {
+public final class Rules {
 
     private Rules() {}
 
-    static void judge(Checked checked, AttachedFiles files) {
+    /** Adds to the flaws of a file whose values have been judged. */
+    public static void judge(Checked checked, AttachedFiles files) {
         Fields machine = Fields.root(checked);
         Roster roster = new Roster(machine);
         site(machine.object("site"));
@@ -39,7 +41,7 @@ final class Rules {
         if (swings && !drive.has("rotatingInertia")) {
             drive.fault(
                     "rotatingInertia",
-                    FaultList.MISSING,
+                    FlawList.MISSING,
                     "the moment of inertia that " + driver + " turns, as \"38 kg m2\"");
         } else if (swings && drive.number("rotatingInertia").orElse(1) == 0) {
             drive.fault("rotatingInertia", drive.said("rotatingInertia"), "more than 0 with " + driver);

@@ -1,4 +1,4 @@
-package throwbench.solver.document;
+package throwbench.solver.document.check;
 
 import throwbench.solver.document.json.Node;
 import throwbench.solver.document.quantity.Dimension;
@@ -21,12 +21,12 @@ final class QuantityCheck {
             return;
         }
         if (!text && !number) {
-            checked.faults().add(node, Said.node(node), Said.wanted(key));
+            checked.flaws().add(node, Said.node(node), Said.wanted(key));
             return;
         }
         Dimension dimension = dimension(key, node);
         if (number && !dimension.isDimensionless()) {
-            checked.faults().add(node, node.text() + " without a unit", Said.wanted(key));
+            checked.flaws().add(node, node.text() + " without a unit", Said.wanted(key));
             return;
         }
         QuantityReading reading = QuantityText.read(node.text(), dimension, checked.ambientPressure());
@@ -34,7 +34,7 @@ final class QuantityCheck {
             take(key, node, quantity, checked);
         } else if (reading instanceof Refusal refusal) {
             String wanted = key.kind() == Kind.CLEARANCE ? Said.wanted(key) : refusal.wanted();
-            checked.faults().add(node, refusal.found(), wanted);
+            checked.flaws().add(node, refusal.found(), wanted);
         }
     }
 
@@ -42,7 +42,7 @@ final class QuantityCheck {
         if (key.range().contains(quantity.value())) {
             checked.measure(node, quantity);
         } else {
-            checked.faults().add(node, Said.node(node), Said.wanted(key));
+            checked.flaws().add(node, Said.node(node), Said.wanted(key));
         }
     }
 
