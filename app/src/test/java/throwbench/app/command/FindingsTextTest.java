@@ -178,8 +178,10 @@ class FindingsTextTest {
         String text = text("m", duties(1, "d"), List.of(unknown));
 
         assertTrue(
-                text.contains("not judged  temperature  chamber A head  -  at most  150 degC\n"
-                        + "            needs a suctionTemperature\n"),
+                text.contains("""
+                not judged  temperature  chamber A head  -  at most  150 degC
+                            needs a suctionTemperature
+                """),
                 text);
     }
 
