@@ -190,7 +190,7 @@ public final class Checker {
             if (member.isRepeated()) {
                 continue;
             }
-            if (member.name().isBlank()) {
+            if (member.name().isBlank() && key.declares().isPresent()) {
                 flaws.add(member, "a name of nothing", "a name");
             }
             key.declares().ifPresent(space -> checked.declare(space, member.name(), member));
