@@ -31,7 +31,7 @@ public final class MachineFile {
 
     /** Reads a file, and the tables that it names; whatever is wrong with either is a fault. */
     public static Reading read(Path file) {
-        return read(file, GasNames.ANY);
+        return read(file, GasNames.TABLE);
     }
 
     /** Reads a file whose mixtures may name these gases. */

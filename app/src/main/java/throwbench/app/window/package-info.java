@@ -1,0 +1,5 @@
+/** The window. */
+@NullMarked
+package throwbench.app.window;
+
+import org.jspecify.annotations.NullMarked;
