@@ -102,14 +102,14 @@ class EveryKeyTest {
         Machine machine = machine();
         assertEquals(
                 new GasMixture(Map.of("methane", 0.62, "carbon dioxide", 0.38), true),
-                machine.fluids().get("sour gas"));
+                Samples.at(machine.fluids(), "sour gas"));
         assertEquals(
                 List.of("methane", "carbon dioxide"),
-                List.copyOf(((GasMixture) machine.fluids().get("sour gas"))
+                List.copyOf(((GasMixture) Samples.at(machine.fluids(), "sour gas"))
                         .moleFractions()
                         .keySet()),
                 "in the order of the file");
-        assertEquals(new Liquid(1025, 2.2e9, 2300), machine.fluids().get("brine 1.0"));
+        assertEquals(new Liquid(1025, 2.2e9, 2300), Samples.at(machine.fluids(), "brine 1.0"));
         assertEquals(Optional.of("low"), machine.stage("high").follows());
         assertEquals(
                 Optional.of(new SuctionLine(some(6.5), some(0.08), 1.8, 0.3, some(98_500 + 10_000), some(1.5))),
@@ -210,10 +210,12 @@ class EveryKeyTest {
     void dutyPointsLoadStepsRangesAndBookmarks() {
         Machine machine = machine();
         DutyPoint point = machine.dutyPoints().get(0);
-        assertEquals(OptionalDouble.empty(), point.stages().get("low").dischargePressure());
-        assertEquals(OptionalDouble.empty(), point.stages().get("high").suctionPressure());
+        assertEquals(OptionalDouble.empty(), Samples.at(point.stages(), "low").dischargePressure());
+        assertEquals(OptionalDouble.empty(), Samples.at(point.stages(), "high").suctionPressure());
         assertEquals(
-                11.5e5 + 98_500, point.stages().get("high").dischargePressure().orElseThrow(), 1e-9);
+                11.5e5 + 98_500,
+                Samples.at(point.stages(), "high").dischargePressure().orElseThrow(),
+                1e-9);
         assertEquals(
                 new ChamberCondition(ChamberState.FAILED_DISCHARGE, 1.5e-4, new Clearance(5e-4, false)),
                 point.condition("A crank"));
@@ -222,7 +224,7 @@ class EveryKeyTest {
                         "crank end open",
                         Map.of("A crank", new ChamberCondition(ChamberState.HELD_OPEN, 0, Clearance.NONE)))),
                 machine.loadSteps());
-        Ranges.StageRange low = machine.ranges().stages().get("low");
+        Ranges.StageRange low = Samples.at(machine.ranges().stages(), "low");
         assertEquals(
                 new Ranges.Range(500 * Math.PI / 30, 620 * Math.PI / 30),
                 machine.ranges().speed().orElseThrow());
@@ -237,19 +239,22 @@ class EveryKeyTest {
         MachineDocument document = Samples.document(Samples.everyKey());
         Map<String, NumericKey> keys = document.numericKeys().stream()
                 .collect(Collectors.toMap(key -> key.path().toString(), key -> key));
-        NumericKey bore = keys.get("throws[0].chambers[0].bore");
+        NumericKey bore = Samples.at(keys, "throws[0].chambers[0].bore");
         assertEquals(Dimension.LENGTH, bore.dimension());
         assertEquals(0.32, bore.quantity().value());
         assertEquals(2e-4, bore.quantity().tolerance(), 1e-19);
         assertEquals(
-                Dimension.VOLUME, keys.get("throws[0].chambers[1].clearance").dimension());
+                Dimension.VOLUME,
+                Samples.at(keys, "throws[0].chambers[1].clearance").dimension());
         assertEquals(
-                Dimension.SHARE, keys.get("throws[0].chambers[0].clearance").dimension());
+                Dimension.SHARE,
+                Samples.at(keys, "throws[0].chambers[0].clearance").dimension());
         assertEquals(
                 Dimension.GAS_PRESSURE,
-                keys.get("dutyPoints[0].stages.lift.suctionPressure").dimension());
+                Samples.at(keys, "dutyPoints[0].stages.lift.suctionPressure").dimension());
         assertEquals(
-                Dimension.SHARE, keys.get("fluids.sour gas.mixture.methane").dimension());
+                Dimension.SHARE,
+                Samples.at(keys, "fluids.sour gas.mixture.methane").dimension());
         assertEquals(false, keys.containsKey("dutyPoints[0].stages.high.suctionPressure"), "balanced is no number");
     }
 

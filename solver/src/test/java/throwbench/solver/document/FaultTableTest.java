@@ -15,7 +15,7 @@ class FaultTableTest {
 
     private static MachineDocument edited(String edits) {
         MachineDocument document = Samples.document(Samples.everyKey());
-        for (String edit : edits.split(" ; ")) {
+        for (String edit : edits.split(" ; ", -1)) {
             if (edit.startsWith("- ")) {
                 document = document.without(document.path(edit.substring(2).strip()));
             } else {

@@ -95,7 +95,8 @@ class MachineFileTest {
     void failedSaveLeavesTheOldFile() throws IOException {
         Path missing = folder.resolve("none/machine.json");
         assertThrows(IOException.class, () -> MachineFile.save(missing, Samples.document("{}")));
-        Path busy = Files.createDirectories(folder.resolve("busy.json/inner")).getParent();
+        Path busy = folder.resolve("busy.json");
+        Files.createDirectories(busy.resolve("inner"));
         assertThrows(IOException.class, () -> MachineFile.save(busy, Samples.document("{}")));
         try (Stream<Path> all = Files.list(folder)) {
             assertEquals(List.of(busy), all.toList());

@@ -90,7 +90,7 @@ class PageExampleTest {
         Machine machine = machine();
         DutyPoint normal = machine.dutyPoints().get(0);
         assertEquals(machine.drive().speed(), normal.speed(), "the drive's where none is given");
-        StageConditions lines = normal.stages().get("first");
+        StageConditions lines = Samples.at(normal.stages(), "first");
         assertEquals(4.1e5 + 101_325, lines.suctionPressure().orElseThrow(), 1e-9);
         assertEquals(305.15, lines.suctionTemperature().orElseThrow(), 1e-12);
         assertEquals(11.5e5 + 101_325, lines.dischargePressure().orElseThrow(), 1e-9);

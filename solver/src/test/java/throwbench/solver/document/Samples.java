@@ -69,4 +69,9 @@ final class Samples {
         return reading.machine()
                 .orElseThrow(() -> new AssertionError(reading.faults().toString()));
     }
+
+    /** What a map has under a name; it must have it. */
+    static <T> T at(Map<String, T> map, String name) {
+        return Objects.requireNonNull(map.get(name), name);
+    }
 }
