@@ -95,6 +95,16 @@ class FaultTableTest {
     }
 
     @Test
+    void controlCharactersOfAFileStayInTheLine() {
+        String line = Samples.read("{\"a\\n\\u001b[2J\": 1}").faults().stream()
+                .map(Fault::line)
+                .filter(said -> said.contains("unknown key"))
+                .findFirst()
+                .orElseThrow();
+        assertTrue(line.startsWith("a\\u000a\\u001b[2J: an unknown key, wanted one of throwbench, "), line);
+    }
+
+    @Test
     void longTextIsCutInTheMessage() {
         String name = "\"" + "x".repeat(100_000) + "\"";
         Fault fault = Samples.read("{\"drive\": {\"speed\": " + name + "}}").faults().stream()

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import throwbench.solver.document.quantity.Dimension;
+import throwbench.solver.machine.Machine;
 
 class MachineDocumentTest {
 
@@ -156,6 +157,22 @@ class MachineDocumentTest {
         assertEquals("{ \"fluids\": { \"x \\\"y\\\"\" : { \"kind\": \"gas\" } } }", renamed.text());
         assertEquals(List.of("x \"y\""), renamed.names(renamed.path("fluids")));
         assertEquals(1, Samples.document("{\"throws\": [1]}").size(KeyPath.ROOT.key("throws")));
+    }
+
+    @Test
+    void foreignLineEndsAndAByteOrderMarkReadTheSameAndStay() {
+        String text = "\ufeff" + Samples.pageExample().replace("\n", "\r\n");
+        Reading reading = Samples.read(text);
+        assertEquals(
+                Optional.of(Samples.machine(Samples.pageExample()).dutyPoints()),
+                reading.machine().map(Machine::dutyPoints));
+        MachineDocument document = reading.document().orElseThrow();
+        MachineDocument changed = document.with(document.path("drive.mechanicalEfficiency"), "94 %");
+        assertEquals(
+                text.replace(
+                        "{ \"kind\": \"constant-speed\" }\r\n",
+                        "{ \"kind\": \"constant-speed\" },\r\n    \"mechanicalEfficiency\": \"94 %\"\r\n"),
+                changed.text());
     }
 
     // places
