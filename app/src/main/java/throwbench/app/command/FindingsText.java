@@ -146,7 +146,7 @@ final class FindingsText implements Written {
             if (value.isEmpty()) {
                 return "-";
             }
-            Readable read = Readable.of(value.getAsDouble(), criterion.unit(), size);
+            ShownValue read = ShownValue.of(value.getAsDouble(), criterion.unit(), size);
             return (read.number() + " " + read.unit()).strip();
         }
 
@@ -158,7 +158,7 @@ final class FindingsText implements Written {
             // against a limit of 0 there is no share, the margin is the difference itself
             return finding.limit().orElse(1) == 0
                     ? cell(finding.margin(), finding.criterion(), margin)
-                    : Readable.percent(margin);
+                    : ShownValue.percent(margin);
         }
 
         String cell(int column) {

@@ -177,10 +177,10 @@ class FindingsTextTest {
                 "needs a suctionTemperature");
         String text = text("m", duties(1, "d"), List.of(unknown));
 
-        assertTrue(
-                text.contains("not judged  temperature  chamber A head  -  at most  150 degC\n"
-                        + "            needs a suctionTemperature\n"),
-                text);
+        assertTrue(text.contains("""
+                not judged  temperature  chamber A head  -  at most  150 degC
+                            needs a suctionTemperature
+                """), text);
     }
 
     @Test
