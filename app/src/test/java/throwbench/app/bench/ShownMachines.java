@@ -114,6 +114,23 @@ public final class ShownMachines {
                 like.bookmarks());
     }
 
+    /** A machine whose first throw has limits of its own. */
+    public static Machine withThrowLimits(Machine like, Limits limits) {
+        Throw first = like.throwsInOrder().get(0);
+        Throw limited = new Throw(
+                first.name(),
+                first.place(),
+                first.linkage(),
+                first.masses(),
+                first.connectingRod(),
+                first.crank(),
+                first.friction(),
+                first.chambers(),
+                first.parts(),
+                limits);
+        return with(like, List.of(limited), like.dutyPoints());
+    }
+
     /** The state of the bench for a duty point of a machine's first throw, SI. */
     public static Shown shown(Machine machine, int dutyIndex) {
         return shown(machine, dutyIndex, UnitSystem.SI);
