@@ -27,6 +27,23 @@ public final class BreakAngles {
         return sorted(all);
     }
 
+    /** Those of all throws and the joints of their pressure curves: what an integral over the revolution is split at. */
+    static double[] forIntegrals(RunningMachine running, int shown) {
+        double[] all = ofMachine(running, shown);
+        for (int i = 0; i < running.throwsInOrder().size(); i++) {
+            double shift = running.angleBetween(shown, i);
+            for (PressureCurve curve : running.throwsInOrder().get(i).curves()) {
+                double[] joints = curve.joints();
+                int before = all.length;
+                all = Arrays.copyOf(all, before + joints.length);
+                for (int k = 0; k < joints.length; k++) {
+                    all[before + k] = Angles.wrap(joints[k] - shift);
+                }
+            }
+        }
+        return sorted(all);
+    }
+
     private static double[] collect(RunningMachine running, int shown, int index, double[] before) {
         RunningThrow t = running.throwsInOrder().get(index);
         int events = t.curves().stream().mapToInt(c -> c.events().size()).sum();
