@@ -46,6 +46,14 @@ public final class BreakAngles {
         return sorted(DoubleStream.concat(deadCentres, events));
     }
 
+    /** Those of a throw and the joints of its pressure curves: what an integral over the revolution is split at. */
+    static double[] forIntegrals(RunningMachine running, int throwIndex) {
+        DoubleStream joints = running.throwsInOrder().get(throwIndex).curves().stream()
+                .map(PressureCurve::joints)
+                .flatMapToDouble(Arrays::stream);
+        return sorted(DoubleStream.concat(stream(ofThrow(running, throwIndex)), joints));
+    }
+
     /** Where the guide force changes its sign, |N| and with it the guide's friction bend. */
     private static DoubleStream guideChanges(RunningMachine running, int throwIndex, double[] steps) {
         RunningThrow t = running.throwsInOrder().get(throwIndex);
