@@ -76,9 +76,10 @@ record FindingGroup(List<Finding> findings) {
         List<String> parts = new ArrayList<>();
         List<String> place = new ArrayList<>();
         if (severalDuties) {
-            place.add("at \"" + shown.where().duty() + "\"");
+            String rank = findings.size() == 1 ? "at" : shown.margin().isPresent() ? "worst at" : "greatest at";
+            place.add(rank + " \"" + shown.where().duty() + "\"");
         }
-        shown.angle().ifPresent(angle -> place.add("crank angle " + Readable.degrees(angle)));
+        shown.angle().ifPresent(angle -> place.add("crank angle " + ShownValue.degrees(angle)));
         if (!place.isEmpty()) {
             parts.add(String.join(", ", place));
         }
@@ -129,12 +130,11 @@ record FindingGroup(List<Finding> findings) {
             }
         }
         OptionalDouble value = least.value();
-        if (value.isEmpty()) {
-            return "";
+        if (value.isEmpty() || least.equals(shown())) {
+            return value.isEmpty() ? "" : "the same at all " + findings.size() + " duty points";
         }
-        Readable read = Readable.of(value.getAsDouble(), criterion().unit(), value.getAsDouble());
-        return "the greatest of " + findings.size() + " duty points; the least is "
-                + (read.number() + " " + read.unit()).strip() + " at \""
+        ShownValue read = ShownValue.of(value.getAsDouble(), criterion().unit(), value.getAsDouble());
+        return "least of " + findings.size() + " duty points: " + (read.number() + " " + read.unit()).strip() + " at \""
                 + least.where().duty() + "\"";
     }
 }

@@ -107,13 +107,15 @@ final class FindingsText implements Written {
                 judged.stream().filter(f -> f.verdict() == Verdict.NOT_MET).count();
         Finding worst = judged.get(0);
         String before = failed == 0
-                ? "All " + judged.size() + " judged findings are met; nearest to its limit: "
+                ? "All " + judged.size() + " judged findings are met; closest: "
                 : failed + " of " + judged.size() + " judged findings " + (failed == 1 ? "is" : "are")
                         + " not met; worst: ";
         String after = ", " + Row.margin(worst) + ".";
-        String what = worst.criterion().title() + " of " + FindingGroup.subject(worst.where())
+        String what = worst.criterion().title() + " of ";
+        String place = FindingGroup.subject(worst.where())
                 + (duties.size() > 1 ? " at \"" + worst.where().duty() + "\"" : "");
-        return before + TextColumns.cut(what, TextColumns.PAGE - before.length() - after.length()) + after;
+        int room = TextColumns.PAGE - before.length() - what.length() - after.length();
+        return before + what + TextColumns.cut(place, room) + after;
     }
 
     /** One row's cells. */
@@ -144,7 +146,7 @@ final class FindingsText implements Written {
             if (value.isEmpty()) {
                 return "-";
             }
-            Readable read = Readable.of(value.getAsDouble(), criterion.unit(), size);
+            ShownValue read = ShownValue.of(value.getAsDouble(), criterion.unit(), size);
             return (read.number() + " " + read.unit()).strip();
         }
 
@@ -156,7 +158,7 @@ final class FindingsText implements Written {
             // against a limit of 0 there is no share, the margin is the difference itself
             return finding.limit().orElse(1) == 0
                     ? cell(finding.margin(), finding.criterion(), margin)
-                    : Readable.percent(margin);
+                    : ShownValue.percent(margin);
         }
 
         String cell(int column) {

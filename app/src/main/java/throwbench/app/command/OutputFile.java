@@ -46,7 +46,7 @@ final class OutputFile {
                 writeBeside(text, wanted.toAbsolutePath());
                 return true;
             }
-            if (Files.isSameFile(wanted, machineFile)) {
+            if (Files.exists(machineFile) && Files.isSameFile(wanted, machineFile)) {
                 return refuse("is the machine file itself");
             }
             if (!Files.isWritable(wanted)) {
