@@ -24,10 +24,54 @@ final class ThrowStations {
 
     /** @param kept a chamber sweep of an earlier solution is used again where sweep and volume are the same */
     ThrowStations(RunningThrow running, Sweep sweep, double framePressure, List<ChamberSweep> kept) {
+        this(
+                running,
+                sweep,
+                framePressure,
+                chambers(running, sweep, kept),
+                new double[running.volumes().size()][sweep.count()],
+                new double[sweep.count()],
+                new ThrowMotion(sweep.count()),
+                new ThrowForces(running.body(), sweep.count()));
+    }
+
+    private ThrowStations(
+            RunningThrow running,
+            Sweep sweep,
+            double framePressure,
+            List<ChamberSweep> chambers,
+            double[][] pressures,
+            double[] gasLoad,
+            ThrowMotion motion,
+            ThrowForces forces) {
         this.running = running;
         this.sweep = sweep;
         this.framePressure = framePressure;
-        this.chambers = new ArrayList<>();
+        this.chambers = chambers;
+        this.pressures = pressures;
+        this.gasLoad = gasLoad;
+        this.motion = motion;
+        this.forces = forces;
+    }
+
+    /** Another solution in these arrays, whose values are given up; kept geometry as above. */
+    ThrowStations over(RunningThrow next, Sweep nextSweep, double nextFramePressure) {
+        boolean fits = nextSweep.count() == sweep.count() && next.volumes().size() == pressures.length;
+        return fits
+                ? new ThrowStations(
+                        next,
+                        nextSweep,
+                        nextFramePressure,
+                        chambers(next, nextSweep, chambers),
+                        pressures,
+                        gasLoad,
+                        motion,
+                        forces.over(next.body()))
+                : new ThrowStations(next, nextSweep, nextFramePressure, chambers);
+    }
+
+    private static List<ChamberSweep> chambers(RunningThrow running, Sweep sweep, List<ChamberSweep> kept) {
+        List<ChamberSweep> chambers = new ArrayList<>();
         for (int i = 0; i < running.volumes().size(); i++) {
             ChamberVolume volume = running.volumes().get(i);
             boolean same = i < kept.size()
@@ -35,10 +79,7 @@ final class ThrowStations {
                     && kept.get(i).chamber().equals(volume);
             chambers.add(same ? kept.get(i) : new ChamberSweep(sweep, volume));
         }
-        pressures = new double[chambers.size()][sweep.count()];
-        gasLoad = new double[sweep.count()];
-        motion = new ThrowMotion(sweep.count());
-        forces = new ThrowForces(running.body(), sweep.count());
+        return chambers;
     }
 
     /** Pressures, gas load, acceleration, inertia load and rod load: what a judgement of reversal needs. */
