@@ -1,11 +1,9 @@
 package throwbench.solver.chamber;
 
 import java.util.Arrays;
-import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.stream.Stream;
 import throwbench.solver.chamber.ValveEvent.Valve;
 import throwbench.solver.fluid.Answer;
 import throwbench.solver.mechanism.Strokes;
@@ -44,13 +42,14 @@ final class IdealValveCycle implements PressureCurve {
     private record Openings(ChamberDuty duty, double suction, double discharge) {
 
         List<ValveEvent> events() {
-            return Stream.of(
-                            new ValveEvent(Valve.SUCTION, true, duty.crankAngleAt(suction, true)),
-                            new ValveEvent(Valve.SUCTION, false, duty.greatestVolumeAngle()),
-                            new ValveEvent(Valve.DISCHARGE, true, duty.crankAngleAt(discharge, false)),
-                            new ValveEvent(Valve.DISCHARGE, false, duty.leastVolumeAngle()))
-                    .sorted(Comparator.comparingDouble(ValveEvent::crankAngle))
-                    .toList();
+            ValveEvent suctionOpens = new ValveEvent(Valve.SUCTION, true, duty.crankAngleAt(suction, true));
+            ValveEvent suctionShuts = new ValveEvent(Valve.SUCTION, false, duty.greatestVolumeAngle());
+            ValveEvent dischargeOpens = new ValveEvent(Valve.DISCHARGE, true, duty.crankAngleAt(discharge, false));
+            ValveEvent dischargeShuts = new ValveEvent(Valve.DISCHARGE, false, duty.leastVolumeAngle());
+            // in the order of the crank angle: each side's volume is least at its own dead centre
+            return duty.volume().side() == Side.HEAD
+                    ? List.of(dischargeShuts, suctionOpens, suctionShuts, dischargeOpens)
+                    : List.of(suctionShuts, dischargeOpens, dischargeShuts, suctionOpens);
         }
     }
 

@@ -7,7 +7,7 @@ package throwbench.solver.revolution;
 final class Illinois {
 
     /** Crank angle to which a root is found, rad: well below what any drawing or criterion tells apart. */
-    private static final double ANGLE_ACCURACY = 1e-13;
+    private static final double ANGLE_ACCURACY = 1e-11;
 
     /** False position that has not ended by then bisects: each further step halves the bracket. */
     private static final int PATIENCE = 30;

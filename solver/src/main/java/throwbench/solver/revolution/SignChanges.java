@@ -53,14 +53,32 @@ final class SignChanges {
         lastAngle = trace.angle(first);
         lastValue = trace.value(first);
         for (int i = first; i < trace.count(); i++) {
-            Optional<Extreme> dip = dip(i);
-            double angle = trace.angle(i);
-            dip.filter(d -> d.crankAngle() < angle).ifPresent(d -> meet(d.crankAngle(), d.value()));
-            meet(angle, trace.value(i));
-            dip.filter(d -> d.crankAngle() > angle).ifPresent(d -> meet(d.crankAngle(), d.value()));
+            if (clear(i)) {
+                meet(trace.angle(i), trace.value(i));
+            } else {
+                meetWithDip(i);
+            }
         }
         // zeros before the first sample that has a sign: from the end of the turn on to that sample
         meet(trace.angle(first) + Angles.TURN, trace.value(first));
+    }
+
+    /** Whether a sample between smooth neighbours is farther from zero than the curve could dip beside it. */
+    private boolean clear(int i) {
+        if (i == 0 || i + 1 == trace.count() || !trace.smooth(i - 1, i + 1)) {
+            return false;
+        }
+        double value = trace.value(i);
+        return Math.abs(value) > Math.abs(value - trace.value(i - 1)) + Math.abs(value - trace.value(i + 1));
+    }
+
+    /** A dip lies before its sample or behind it. */
+    private void meetWithDip(int i) {
+        Optional<Extreme> dip = dip(i);
+        double angle = trace.angle(i);
+        dip.filter(d -> d.crankAngle() < angle).ifPresent(d -> meet(d.crankAngle(), d.value()));
+        meet(angle, trace.value(i));
+        dip.filter(d -> d.crankAngle() > angle).ifPresent(d -> meet(d.crankAngle(), d.value()));
     }
 
     private boolean isZero(double value) {

@@ -8,6 +8,7 @@ import throwbench.solver.chamber.ChamberVolume;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.load.ThrowForces;
 import throwbench.solver.load.ThrowMotion;
+import throwbench.solver.mechanism.Linkage;
 import throwbench.solver.mechanism.Sweep;
 
 /** One throw at the stations of its sweep: pressures, motion and forces, filled by the same loops for one station or many. */
@@ -68,6 +69,19 @@ final class ThrowStations {
                         motion,
                         forces.over(next.body()))
                 : new ThrowStations(next, nextSweep, nextFramePressure, chambers);
+    }
+
+    /** The same with the sweep kept where the geometry still holds; stations count from head-end dead centre. */
+    ThrowStations over(RunningMachine next, int throwIndex) {
+        RunningThrow t = next.throwsInOrder().get(throwIndex);
+        Linkage linkage = t.body().linkage();
+        Sweep nextSweep = sweep;
+        if (!sweep.linkage().equals(linkage) || sweep.rotation() != next.rotation()) {
+            nextSweep = sweep.count() == 1
+                    ? Sweep.single(linkage, next.rotation())
+                    : Sweep.wholeTurn(linkage, next.rotation(), 0, sweep.count());
+        }
+        return over(t, nextSweep, next.machine().site().framePressure());
     }
 
     private static List<ChamberSweep> chambers(RunningThrow running, Sweep sweep, List<ChamberSweep> kept) {
