@@ -1,6 +1,5 @@
 package throwbench.solver.document;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
@@ -153,28 +152,7 @@ public final class MachineDocument {
 
     /** Every number that the file holds and that can be read, in the order of the file. */
     public List<NumericKey> numericKeys() {
-        Checked checked = Checker.check(parsed, GasNames.ANY);
-        List<NumericKey> found = new ArrayList<>();
-        collectNumbers(root, KeyPath.ROOT, checked, found);
-        return found;
-    }
-
-    private static void collectNumbers(Node nest, KeyPath path, Checked checked, List<NumericKey> found) {
-        for (Node node : nest.members()) {
-            if (node.isRepeated()) {
-                continue;
-            }
-            KeyPath own = nest.type() == Node.Type.LIST ? path.item(node.place()) : path.key(node.name());
-            Key key = checked.key(node);
-            Quantity quantity = checked.quantity(node).orElse(null);
-            if (quantity != null && key != null) {
-                // a clearance is a share or a volume, as its unit says
-                Dimension dimension = key.dimension().orElse(Dimension.SHARE);
-                found.add(
-                        new NumericKey(own, dimension.holds(quantity.unit()) ? dimension : Dimension.VOLUME, quantity));
-            }
-            collectNumbers(node, own, checked, found);
-        }
+        return NumericKey.collect(root, Checker.check(parsed, GasNames.ANY));
     }
 
     /**
