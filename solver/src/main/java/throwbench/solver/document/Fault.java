@@ -9,8 +9,8 @@ package throwbench.solver.document;
  */
 public record Fault(String path, String found, String wanted) {
 
-    /** One line: {@code path: found, wanted}. */
+    /** One line: {@code path: found, wanted …}. */
     public String line() {
-        return (path.isEmpty() ? "" : path + ": ") + found + ", " + wanted;
+        return (path.isEmpty() ? "" : path + ": ") + found + ", wanted " + wanted;
     }
 }
