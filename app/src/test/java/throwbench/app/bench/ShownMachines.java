@@ -117,6 +117,23 @@ public final class ShownMachines {
                 like.bookmarks());
     }
 
+    /** A machine whose first throw has limits of its own. */
+    public static Machine withThrowLimits(Machine like, Limits limits) {
+        Throw first = like.throwsInOrder().get(0);
+        Throw limited = new Throw(
+                first.name(),
+                first.place(),
+                first.linkage(),
+                first.masses(),
+                first.connectingRod(),
+                first.crank(),
+                first.friction(),
+                first.chambers(),
+                first.parts(),
+                limits);
+        return with(like, List.of(limited), like.dutyPoints());
+    }
+
     /** These machines are made from records: no file describes them, and no view reads one. */
     private static final MachineDocument NO_FILE = MachineDocument.read("{}", AttachedFiles.NONE, GasNames.ANY)
             .document()

@@ -143,7 +143,7 @@ class FindingsPanelTest {
                 shown.summary(),
                 List.of(),
                 shown.units(),
-                shown.solveMillis());
+                0);
         robot.interact(() -> {
             panel.show(none);
             panel.draw(instant);

@@ -70,8 +70,13 @@ final class ThrowSettler {
 
     private Optional<PressureCurve> solve(int chamberIndex, Chamber chamber, ChamberVolume volume) {
         String path = "throws[" + index + "].chambers[" + chamberIndex + "].cycle.kind";
+        ChamberCondition condition = duty.condition(chamber.name());
+        Optional<CycleOutcome> alone = chamber.cycle().solveAlone(condition);
+        if (alone.isPresent()) {
+            return taken(path, alone.get());
+        }
         if (chamber.stage().isEmpty()) {
-            return refuse(path, "chambers without a stage are not solved by this version");
+            return refuse(path, "a " + chamber.cycle().kind() + " cycle needs a stage");
         }
         String stage = chamber.stage().get();
         StageConditions lines = duty.stages().get(stage);
@@ -82,7 +87,6 @@ final class ThrowSettler {
                     "stages." + stage + ".follows",
                     "balanced interstage pressures are not solved by this version; give them at the duty point");
         }
-        ChamberCondition condition = duty.condition(chamber.name());
         CycleOutcome outcome = chamber.cycle()
                 .solve(new ChamberDuty(
                         described.linkage(),
@@ -96,6 +100,10 @@ final class ThrowSettler {
                         condition,
                         duty.speed(),
                         chamber.flowAllowance()));
+        return taken(path, outcome);
+    }
+
+    private Optional<PressureCurve> taken(String path, CycleOutcome outcome) {
         return outcome.curve().isPresent() ? outcome.curve() : refuse(path, outcome.refusal());
     }
 
