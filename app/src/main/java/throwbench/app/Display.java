@@ -52,7 +52,7 @@ record Display(String system, String address, String toolkit, String libraryFold
     }
 
     private boolean hasLibrary() {
-        for (String folder : libraryFolders.split(":")) {
+        for (String folder : libraryFolders.split(":", -1)) {
             if (!folder.isEmpty() && Files.exists(root.resolve(relative(folder)).resolve(LIBRARY))) {
                 return true;
             }

@@ -42,7 +42,10 @@ public final class Launcher {
     }
 
     private static boolean isFile(String word) {
-        return word.endsWith(".json") || word.indexOf('/') >= 0 || word.indexOf('\\') >= 0 || Files.exists(Path.of(word));
+        return word.endsWith(".json")
+                || word.indexOf('/') >= 0
+                || word.indexOf('\\') >= 0
+                || Files.exists(Path.of(word));
     }
 
     private static void exit(ExitCode code) {

@@ -4,10 +4,10 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
-import throwbench.solver.document.AttachedFiles;
-import throwbench.solver.document.GasNames;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.Reading;
+import throwbench.solver.document.attached.AttachedFiles;
+import throwbench.solver.document.check.GasNames;
 
 /** Sample machines that come inside the program, so that it opens one from any folder. */
 public final class Samples {
@@ -31,6 +31,6 @@ public final class Samples {
 
     /** Reads a sample that names no other files. */
     public static Reading read(String name) {
-        return MachineDocument.read(text(name), AttachedFiles.NONE, GasNames.ANY);
+        return MachineDocument.read(text(name), AttachedFiles.NONE, GasNames.TABLE);
     }
 }

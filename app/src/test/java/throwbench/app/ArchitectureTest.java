@@ -46,8 +46,8 @@ class ArchitectureTest {
             .because("what is open and what the user did is tested without a window");
 
     @ArchTest
-    static final ArchRule VIEWS_MEET_IN_BENCH_ONLY = slices()
-            .matching("throwbench.app.(linkage|strip|gauge|findings|buildsheet)..")
+    static final ArchRule VIEWS_MEET_IN_BENCH_ONLY = slices().matching(
+                    "throwbench.app.(linkage|strip|gauge|findings|buildsheet)..")
             .should()
             .notDependOnEachOther()
             .because("a view can then be read, changed and tested alone");
@@ -78,5 +78,6 @@ class ArchitectureTest {
             .because("AWT beside JavaFX costs a second toolkit's start");
 
     @ArchTest
-    static final ArchRule NO_CYCLES = slices().matching("throwbench.app.(*)..").should().beFreeOfCycles();
+    static final ArchRule NO_CYCLES =
+            slices().matching("throwbench.app.(*)..").should().beFreeOfCycles();
 }

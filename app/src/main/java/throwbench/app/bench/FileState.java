@@ -2,8 +2,8 @@ package throwbench.app.bench;
 
 import java.nio.file.Path;
 import java.util.Optional;
-import throwbench.solver.document.AttachedFiles;
 import throwbench.solver.document.MachineFile;
+import throwbench.solver.document.attached.AttachedFiles;
 
 /**
  * The file behind the bench.

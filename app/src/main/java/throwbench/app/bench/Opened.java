@@ -3,9 +3,7 @@ package throwbench.app.bench;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
-import throwbench.solver.document.AttachedFiles;
 import throwbench.solver.document.Fault;
-import throwbench.solver.document.GasNames;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.MachineFile;
 import throwbench.solver.document.Reading;
@@ -28,9 +26,9 @@ public record Opened(MachineDocument document, Machine machine, FileState file) 
         return judge(MachineFile.read(path), Optional.of(path));
     }
 
-    /** Reads a text that no file holds, such as a sample. */
-    public static Outcome read(String text) {
-        return judge(MachineDocument.read(text, AttachedFiles.NONE, GasNames.ANY), Optional.empty());
+    /** A reading that no file is behind, such as a sample's. */
+    public static Outcome of(Reading reading) {
+        return judge(reading, Optional.empty());
     }
 
     private static Outcome judge(Reading reading, Optional<Path> path) {

@@ -87,7 +87,9 @@ final class Arguments {
 
     private void checkOperands() {
         if (operands.isEmpty() || operands.get(0).isEmpty()) {
-            refuse(command.name(), "no machine file given, throwbench " + command.synopsis() + " is wanted");
+            refuse(
+                    command.name(),
+                    "no machine file given, one is wanted; throwbench " + command.name() + " --help tells more");
         }
         for (int i = 1; i < operands.size(); i++) {
             refuse(operands.get(i), "one word too many, " + command.name() + " takes one machine file");
@@ -115,7 +117,8 @@ final class Arguments {
         if (words.contains(given)) {
             return Optional.of(given);
         }
-        terminal.complain("throwbench", option.word(), "\"" + given + "\", " + String.join(" or ", words) + " is wanted");
+        terminal.complain(
+                "throwbench", option.word(), "\"" + given + "\", " + String.join(" or ", words) + " is wanted");
         return Optional.empty();
     }
 }

@@ -23,7 +23,7 @@ final class CheckCommand implements Command {
     @Override
     public String help() {
         return """
-                Judges a machine against its limits; the exit code is 0 when every judged finding is met, 1 when not.
+                Judges a machine against its limits. The exit code is 0 when every judged finding is met, else 1.
 
                   --duty NAME         the duty point; all of them if left out
                   --format text|json  for people or for programs; text if left out

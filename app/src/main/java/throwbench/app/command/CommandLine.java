@@ -74,7 +74,8 @@ public final class CommandLine {
         }
         List<String> rest = words.subList(1, words.size());
         if (rest.contains("--help") || rest.contains("-h")) {
-            return print("throwbench " + command.get().synopsis() + "\n\n" + command.get().help());
+            return print("throwbench " + command.get().synopsis() + "\n\n"
+                    + command.get().help());
         }
         Optional<Arguments> arguments = Arguments.read(command.get(), rest, terminal);
         return arguments.isPresent() ? command.get().run(arguments.get(), terminal) : ExitCode.REFUSED;
@@ -88,7 +89,8 @@ public final class CommandLine {
         if (source.isEmpty()) {
             return ExitCode.REFUSED;
         }
-        ExitCode judged = CheckCommand.judge(source.get(), source.get().machine().dutyPoints(), "text", terminal);
+        ExitCode judged =
+                CheckCommand.judge(source.get(), source.get().machine().dutyPoints(), "text", terminal);
         return judged == ExitCode.NOT_MET ? ExitCode.DONE : judged;
     }
 
@@ -115,8 +117,8 @@ public final class CommandLine {
         List<String> known = word.startsWith("-") ? List.of("--help", "--version") : names;
         List<String> near = NearWords.of(word, known);
         return (word.startsWith("-") ? "no such option" : "no such command")
-                + (near.isEmpty() ? "; there is " : "; perhaps ")
-                + String.join(near.isEmpty() ? ", " : " or ", near.isEmpty() ? known : near);
+                + (near.isEmpty() ? "; there are " : "; perhaps ")
+                + String.join(near.isEmpty() ? " and " : " or ", near.isEmpty() ? known : near);
     }
 
     private String overview() {
@@ -127,7 +129,7 @@ public final class CommandLine {
                     opens the window on a machine, or on a sample
                 """);
         for (Command command : commands) {
-            text.append("throwbench ").append(command.synopsis()).append('\n');
+            text.append(usage(command)).append('\n');
             text.append("    ").append(command.help(), 0, command.help().indexOf('\n') + 1);
         }
         return text.append("""
@@ -138,5 +140,18 @@ public final class CommandLine {
 
                 Exit codes: 0 done; 1 a limit is not met; 2 the command or its input was wrong; 3 the program failed.
                 """).toString();
+    }
+
+    /** The words of a command in lines, none broken between an option and its value. */
+    private static String usage(Command command) {
+        StringBuilder text = new StringBuilder();
+        int length = 0;
+        for (String part :
+                ("throwbench " + command.synopsis()).replace(" [", "\n[").split("\n")) {
+            boolean breaks = length + 1 + part.length() > TextColumns.PAGE;
+            text.append(breaks ? "\n        " : length == 0 ? "" : " ").append(part);
+            length = (breaks ? 8 : length + 1) + part.length();
+        }
+        return text.toString();
     }
 }

@@ -76,7 +76,8 @@ record FindingGroup(List<Finding> findings) {
         List<String> parts = new ArrayList<>();
         List<String> place = new ArrayList<>();
         if (severalDuties) {
-            place.add("at \"" + shown.where().duty() + "\"");
+            String rank = findings.size() == 1 ? "at" : shown.margin().isPresent() ? "worst at" : "greatest at";
+            place.add(rank + " \"" + shown.where().duty() + "\"");
         }
         shown.angle().ifPresent(angle -> place.add("crank angle " + Readable.degrees(angle)));
         if (!place.isEmpty()) {
@@ -114,7 +115,9 @@ record FindingGroup(List<Finding> findings) {
     private static String names(List<Finding> some) {
         StringBuilder text = new StringBuilder();
         for (int i = 0; i < some.size() && i < NAMED; i++) {
-            text.append(i == 0 ? "\"" : ", \"").append(some.get(i).where().duty()).append('"');
+            text.append(i == 0 ? "\"" : ", \"")
+                    .append(some.get(i).where().duty())
+                    .append('"');
         }
         return some.size() > NAMED ? text + " and " + (some.size() - NAMED) + " more" : text.toString();
     }
@@ -127,11 +130,11 @@ record FindingGroup(List<Finding> findings) {
             }
         }
         OptionalDouble value = least.value();
-        if (value.isEmpty()) {
-            return "";
+        if (value.isEmpty() || least.equals(shown())) {
+            return value.isEmpty() ? "" : "the same at all " + findings.size() + " duty points";
         }
         Readable read = Readable.of(value.getAsDouble(), criterion().unit(), value.getAsDouble());
-        return "the greatest of " + findings.size() + " duty points; the least is "
-                + (read.number() + " " + read.unit()).strip() + " at \"" + least.where().duty() + "\"";
+        return "least of " + findings.size() + " duty points: " + (read.number() + " " + read.unit()).strip() + " at \""
+                + least.where().duty() + "\"";
     }
 }

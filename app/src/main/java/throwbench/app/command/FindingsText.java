@@ -19,8 +19,9 @@ import throwbench.solver.machine.DutyPoint;
  */
 final class FindingsText implements Written {
 
-    private static final String CAUTION = "Results support, and do not replace, the manufacturer's limits, local codes and"
-            + " the judgement of a licensed engineer.";
+    private static final String CAUTION =
+            "Results support, and do not replace, the manufacturer's limits, local codes and"
+                    + " the judgement of a licensed engineer.";
 
     /** Blanks between two columns. */
     private static final int GAP = 2;
@@ -96,20 +97,25 @@ final class FindingsText implements Written {
     }
 
     private String answer() {
-        List<Finding> judged =
-                judgement.findings().stream().filter(f -> f.margin().isPresent()).toList();
+        List<Finding> judged = judgement.findings().stream()
+                .filter(f -> f.margin().isPresent())
+                .toList();
         if (judged.isEmpty()) {
             return "Nothing is judged: no limit is given for what could be found.";
         }
-        long failed = judged.stream().filter(f -> f.verdict() == Verdict.NOT_MET).count();
+        long failed =
+                judged.stream().filter(f -> f.verdict() == Verdict.NOT_MET).count();
         Finding worst = judged.get(0);
         String before = failed == 0
-                ? "All " + judged.size() + " judged findings are met; nearest to its limit: "
-                : failed + " of " + judged.size() + " judged findings " + (failed == 1 ? "is" : "are") + " not met; worst: ";
+                ? "All " + judged.size() + " judged findings are met; closest: "
+                : failed + " of " + judged.size() + " judged findings " + (failed == 1 ? "is" : "are")
+                        + " not met; worst: ";
         String after = ", " + Row.margin(worst) + ".";
-        String what = worst.criterion().title() + " of " + FindingGroup.subject(worst.where())
+        String what = worst.criterion().title() + " of ";
+        String place = FindingGroup.subject(worst.where())
                 + (duties.size() > 1 ? " at \"" + worst.where().duty() + "\"" : "");
-        return before + TextColumns.cut(what, TextColumns.PAGE - before.length() - after.length()) + after;
+        int room = TextColumns.PAGE - before.length() - what.length() - after.length();
+        return before + what + TextColumns.cut(place, room) + after;
     }
 
     /** One row's cells. */

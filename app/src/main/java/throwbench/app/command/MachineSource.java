@@ -42,9 +42,7 @@ final class MachineSource {
             terminal.complain(file, fault.line());
         }
         Optional<Machine> machine = reading.machine();
-        return machine.isPresent()
-                ? Optional.of(new MachineSource(file, machine.get(), terminal))
-                : Optional.empty();
+        return machine.isPresent() ? Optional.of(new MachineSource(file, machine.get(), terminal)) : Optional.empty();
     }
 
     Machine machine() {
@@ -85,7 +83,7 @@ final class MachineSource {
 
     private void missing(String path, String kind, String name, List<String> existing) {
         terminal.complain(
-                file, path, "no " + kind + " \"" + name + "\", there is " + NearWords.existing(name, existing));
+                file, path, "no " + kind + " \"" + name + "\", the file has " + NearWords.existing(name, existing));
     }
 
     /** Says why the machine cannot be solved. */

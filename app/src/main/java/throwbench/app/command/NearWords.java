@@ -39,23 +39,23 @@ final class NearWords {
         return more > 0 ? text + " and " + more + " more" : text.toString();
     }
 
-    /** Letters to insert, drop or change to come from one word to the other (Levenshtein), whatever their case. */
+    /** Letters to insert, drop, change or swap with their neighbour to come from one word to the other, whatever their case. */
     static int distance(String one, String other) {
         String a = one.toLowerCase(Locale.ROOT);
         String b = other.toLowerCase(Locale.ROOT);
-        int[] row = new int[b.length() + 1];
-        for (int j = 0; j <= b.length(); j++) {
-            row[j] = j;
-        }
-        for (int i = 1; i <= a.length(); i++) {
-            int diagonal = row[0];
-            row[0] = i;
-            for (int j = 1; j <= b.length(); j++) {
-                int changed = diagonal + (a.charAt(i - 1) == b.charAt(j - 1) ? 0 : 1);
-                diagonal = row[j];
-                row[j] = Math.min(changed, 1 + Math.min(row[j], row[j - 1]));
+        int[][] steps = new int[a.length() + 1][b.length() + 1];
+        for (int i = 0; i <= a.length(); i++) {
+            for (int j = 0; j <= b.length(); j++) {
+                steps[i][j] = i == 0 || j == 0 ? i + j : steps(a, b, i, j, steps);
             }
         }
-        return row[b.length()];
+        return steps[a.length()][b.length()];
+    }
+
+    private static int steps(String a, String b, int i, int j, int[][] before) {
+        boolean same = a.charAt(i - 1) == b.charAt(j - 1);
+        int least = Math.min(before[i - 1][j - 1] + (same ? 0 : 1), 1 + Math.min(before[i - 1][j], before[i][j - 1]));
+        boolean swapped = i > 1 && j > 1 && a.charAt(i - 1) == b.charAt(j - 2) && a.charAt(i - 2) == b.charAt(j - 1);
+        return swapped ? Math.min(least, before[i - 2][j - 2] + 1) : least;
     }
 }

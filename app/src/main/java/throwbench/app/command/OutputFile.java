@@ -46,7 +46,7 @@ final class OutputFile {
                 writeBeside(text, wanted.toAbsolutePath());
                 return true;
             }
-            if (Files.isSameFile(wanted, machineFile)) {
+            if (Files.exists(machineFile) && Files.isSameFile(wanted, machineFile)) {
                 return refuse("is the machine file itself");
             }
             if (!Files.isWritable(wanted)) {
@@ -104,7 +104,8 @@ final class OutputFile {
     }
 
     private static void writeInto(Written text, Path file) throws IOException {
-        try (OutputStream out = Files.newOutputStream(file, StandardOpenOption.WRITE, StandardOpenOption.TRUNCATE_EXISTING)) {
+        try (OutputStream out =
+                Files.newOutputStream(file, StandardOpenOption.WRITE, StandardOpenOption.TRUNCATE_EXISTING)) {
             text.writeTo(out);
         }
     }

@@ -20,12 +20,14 @@ record Readable(String number, String unit) {
      */
     static Readable of(double value, String unit, double size) {
         return switch (unit) {
-            case "N", "N m", "W" -> Math.abs(size) >= KILO
-                    ? new Readable(digits(value / KILO), "k" + unit)
-                    : new Readable(digits(value), unit);
-            case "Pa" -> Math.abs(size) >= MEGA
-                    ? new Readable(digits(value / MEGA), "MPa")
-                    : new Readable(digits(value / KILO), "kPa");
+            case "N", "N m", "W" ->
+                Math.abs(size) >= KILO
+                        ? new Readable(digits(value / KILO), "k" + unit)
+                        : new Readable(digits(value), unit);
+            case "Pa" ->
+                Math.abs(size) >= MEGA
+                        ? new Readable(digits(value / MEGA), "MPa")
+                        : new Readable(digits(value / KILO), "kPa");
             case "K" -> new Readable(digits(value - CELSIUS_ZERO), "degC");
             case "1" -> new Readable(digits(value), "");
             default -> new Readable(digits(value), unit);

@@ -29,7 +29,8 @@ final class TextColumns {
 
     /** The text, its middle left out where it is longer than the width; line breaks become blanks. */
     static String cut(String text, int width) {
-        int[] letters = text.codePoints().map(c -> Character.isISOControl(c) ? ' ' : c).toArray();
+        int[] letters =
+                text.codePoints().map(c -> Character.isISOControl(c) ? ' ' : c).toArray();
         if (letters.length <= width) {
             return new String(letters, 0, letters.length);
         }

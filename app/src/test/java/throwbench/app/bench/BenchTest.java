@@ -28,7 +28,12 @@ class BenchTest {
     private final Bench bench = new Bench(SAMPLE, Runnable::run, Runnable::run);
 
     private double rodTension() {
-        return bench.shown().get().summary().extremes(Column.ROD_LOAD).greatest().value();
+        return bench.shown()
+                .get()
+                .summary()
+                .extremes(Column.ROD_LOAD)
+                .greatest()
+                .value();
     }
 
     @Test

@@ -116,10 +116,20 @@ class BenchWindowTest {
     @Test
     void anEditedMassReachesResultsWhileTheCrankKeepsTurning(FxRobot robot) throws TimeoutException {
         robot.interact(() -> bench.playhead().setPlaying(true));
-        double before = bench.shown().get().summary().extremes(Column.ROD_LOAD).greatest().value();
+        double before = bench.shown()
+                .get()
+                .summary()
+                .extremes(Column.ROD_LOAD)
+                .greatest()
+                .value();
         type(robot, "throws[0].masses.piston", "60,5 kg");
         until(() -> bench.shown().get().shownThrow().masses().piston() == 60.5);
-        double after = bench.shown().get().summary().extremes(Column.ROD_LOAD).greatest().value();
+        double after = bench.shown()
+                .get()
+                .summary()
+                .extremes(Column.ROD_LOAD)
+                .greatest()
+                .value();
         assertTrue(Math.abs(after - before) > 1000, "22 kg more at 450 m/s2 are 10 kN");
         assertEquals("60.5 kg", field(robot, "throws[0].masses.piston").getText());
         double angle = angle();
@@ -129,7 +139,8 @@ class BenchWindowTest {
     @Test
     void aWrongValueIsSaidUnderItsFieldAndTheMachineStays(FxRobot robot) throws TimeoutException {
         type(robot, "throws[0].crankRadius", "500 mm");
-        Label wrong = robot.lookup(n -> "throws[0].crankRadius-wrong".equals(n.getId())).queryAs(Label.class);
+        Label wrong = robot.lookup(n -> "throws[0].crankRadius-wrong".equals(n.getId()))
+                .queryAs(Label.class);
         until(() -> wrong.isVisible() && !wrong.getText().isEmpty());
         assertEquals(0.075, bench.shown().get().shownThrow().linkage().crankRadius());
         assertEquals("500 mm", field(robot, "throws[0].crankRadius").getText());

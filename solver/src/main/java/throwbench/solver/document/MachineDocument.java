@@ -1,14 +1,25 @@
 package throwbench.solver.document;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
+import throwbench.solver.document.attached.AttachedFiles;
+import throwbench.solver.document.check.Checked;
+import throwbench.solver.document.check.Checker;
+import throwbench.solver.document.check.GasNames;
+import throwbench.solver.document.check.MachineBuilder;
+import throwbench.solver.document.check.Rules;
 import throwbench.solver.document.json.Flaw;
 import throwbench.solver.document.json.JsonText;
 import throwbench.solver.document.json.Node;
 import throwbench.solver.document.json.Parsed;
 import throwbench.solver.document.json.TextEdit;
+import throwbench.solver.document.quantity.Dimension;
+import throwbench.solver.document.quantity.Quantity;
+import throwbench.solver.document.quantity.QuantityText;
 import throwbench.solver.document.schema.Key;
+import throwbench.solver.document.schema.Kind;
 
 /**
  * A machine file's text with the place of every value in it. Immutable: an edit gives another document, whose text differs
@@ -48,10 +59,10 @@ public final class MachineDocument {
 
     /** Reads the machine, or every fault. */
     public Reading read(AttachedFiles files, GasNames gases) {
-        Checked checked = Checker.check(root, parsed.count(), gases);
-        parsed.flaws().forEach(flaw -> checked.faults().add(flaw.offset(), fault(flaw)));
+        Checked checked = Checker.check(parsed, gases);
         Rules.judge(checked, files);
-        List<Fault> faults = checked.faults().inOrder();
+        List<Fault> faults =
+                checked.flawsInOrder().stream().map(MachineDocument::fault).toList();
         return new Reading(
                 Optional.of(this),
                 faults.isEmpty() ? Optional.of(MachineBuilder.build(checked)) : Optional.empty(),
@@ -117,7 +128,28 @@ public final class MachineDocument {
 
     /** Every number that the file holds and that can be read, in the order of the file. */
     public List<NumericKey> numericKeys() {
-        return Checker.check(root, parsed.count(), GasNames.ANY).numericKeys();
+        Checked checked = Checker.check(parsed, GasNames.ANY);
+        List<NumericKey> found = new ArrayList<>();
+        collectNumbers(root, KeyPath.ROOT, checked, found);
+        return found;
+    }
+
+    private static void collectNumbers(Node nest, KeyPath path, Checked checked, List<NumericKey> found) {
+        for (Node node : nest.members()) {
+            if (node.isRepeated()) {
+                continue;
+            }
+            KeyPath own = nest.type() == Node.Type.LIST ? path.item(node.place()) : path.key(node.name());
+            Key key = checked.key(node);
+            Quantity quantity = checked.quantity(node).orElse(null);
+            if (quantity != null && key != null) {
+                // a clearance is a share or a volume, as its unit says
+                Dimension dimension = key.dimension().orElse(Dimension.SHARE);
+                found.add(
+                        new NumericKey(own, dimension.holds(quantity.unit()) ? dimension : Dimension.VOLUME, quantity));
+            }
+            collectNumbers(node, own, checked, found);
+        }
     }
 
     /**
@@ -135,7 +167,31 @@ public final class MachineDocument {
         return withJson(path, Literals.json(value, PathReader.key(path, root), node));
     }
 
-    /** The same with a piece of JSON for the value: an object, a list. */
+    /**
+     * Another number at a key, written in the coherent SI unit so that it reads back as the very same double.
+     *
+     * @param si SI value; Pa absolute for a pressure in a line
+     * @throws IllegalArgumentException when the page has no number at the place
+     */
+    public MachineDocument withNumber(KeyPath path, double si) {
+        Key key = PathReader.key(path, root);
+        boolean clearance = key != null && key.kind() == Kind.CLEARANCE;
+        Dimension dimension = clearance
+                ? clearanceDimension(path)
+                : key == null ? null : key.dimension().orElse(null);
+        if (dimension == null) {
+            throw new IllegalArgumentException("no number at " + path);
+        }
+        return with(path, QuantityText.exact(si, dimension));
+    }
+
+    private Dimension clearanceDimension(KeyPath path) {
+        String present = valueText(path).orElse("");
+        boolean volume = QuantityText.read(present, Dimension.VOLUME, 0) instanceof Quantity;
+        return volume ? Dimension.VOLUME : Dimension.SHARE;
+    }
+
+    /** A piece of JSON for a value: an object, a list; what is missing above it is inserted too. */
     public MachineDocument withJson(KeyPath path, String json) {
         Node node = PathReader.node(path, root);
         if (node != null) {

@@ -16,6 +16,8 @@ import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
 import java.nio.file.attribute.PosixFileAttributeView;
 import java.util.Set;
+import throwbench.solver.document.attached.AttachedFiles;
+import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.json.JsonText;
 
 /** Machine files on disk. */
@@ -29,7 +31,7 @@ public final class MachineFile {
 
     /** Reads a file, and the tables that it names; whatever is wrong with either is a fault. */
     public static Reading read(Path file) {
-        return read(file, GasNames.ANY);
+        return read(file, GasNames.TABLE);
     }
 
     /** Reads a file whose mixtures may name these gases. */

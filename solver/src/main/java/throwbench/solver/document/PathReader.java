@@ -53,7 +53,7 @@ final class PathReader {
     }
 
     private static @Nullable Key field(Key object, @Nullable Node node, String name) {
-        String word = object.kind() == Kind.VARIANT ? Checker.word(node) : "";
+        String word = node != null && object.kind() == Kind.VARIANT ? node.text("kind") : "";
         if (object.variants().contains(word)) {
             return object.children(word).get(name);
         }

@@ -16,6 +16,7 @@ public record IdealHeatCapacity(
         }
     }
 
+    /** Whether a temperature, K, is in the range of the polynomial. */
     public boolean isKnownAt(double temperature) {
         return temperature >= from && temperature <= to;
     }

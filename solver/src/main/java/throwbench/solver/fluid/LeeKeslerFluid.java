@@ -14,13 +14,15 @@ import org.apache.commons.math3.analysis.solvers.BrentSolver;
  * of the tables made from them confirm the digits. The departures follow from the residual Helmholtz energy
  * a = B ρ + C ρ²/2 + D ρ⁵/5 + c4/t³ G, G = (β + 1 − (β + 1 + γ ρ²) exp(−γ ρ²))/(2 γ).
  */
-enum LeeKeslerFluid {
+record LeeKeslerFluid(Virial virial, Dense dense) {
+
     /** ω = 0. */
-    SIMPLE(
+    static final LeeKeslerFluid SIMPLE = new LeeKeslerFluid(
             new Virial(0.1181193, 0.265728, 0.154790, 0.030323, 0.0236744, 0.0186984, 0),
-            new Dense(0.155488e-4, 0.623689e-4, 0.042724, 0.65392, 0.060167)),
+            new Dense(0.155488e-4, 0.623689e-4, 0.042724, 0.65392, 0.060167));
+
     /** n-octane, ω = {@link #REFERENCE_ACENTRIC_FACTOR}. */
-    REFERENCE(
+    static final LeeKeslerFluid REFERENCE = new LeeKeslerFluid(
             new Virial(0.2026579, 0.331511, 0.027655, 0.203488, 0.0313385, 0.0503618, 0.016901),
             new Dense(0.48736e-4, 0.0740336e-4, 0.041577, 1.226, 0.03754));
 
@@ -32,17 +34,11 @@ enum LeeKeslerFluid {
     /** ρ of a liquid under high pressure; no gas of the equation's range is denser. */
     private static final double DENSEST = 12;
 
-    private final Virial virial;
-    private final Dense dense;
+    /** Constants of B and C. */
+    record Virial(double b1, double b2, double b3, double b4, double c1, double c2, double c3) {}
 
-    LeeKeslerFluid(Virial virial, Dense dense) {
-        this.virial = virial;
-        this.dense = dense;
-    }
-
-    private record Virial(double b1, double b2, double b3, double b4, double c1, double c2, double c3) {}
-
-    private record Dense(double d1, double d2, double c4, double beta, double gamma) {}
+    /** Constants of D and of the last term. */
+    record Dense(double d1, double d2, double c4, double beta, double gamma) {}
 
     /**
      * The density of the gas: the first crossing of the pressure on the isotherm from ρ = 0 upwards. Empty where the isotherm

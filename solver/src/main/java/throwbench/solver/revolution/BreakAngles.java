@@ -1,13 +1,17 @@
 package throwbench.solver.revolution;
 
 import java.util.Arrays;
+import java.util.List;
+import java.util.stream.DoubleStream;
 import throwbench.solver.chamber.PressureCurve;
 import throwbench.solver.chamber.ValveEvent;
 import throwbench.solver.mechanism.Angles;
 import throwbench.solver.mechanism.Approach;
+import throwbench.solver.mechanism.Sweep;
 
 /**
- * The crank angles at which a curve may bend or step: dead centres and valve events. Between them every quantity is smooth.
+ * The crank angles at which a curve may bend or step: dead centres, valve events and, with friction at the guide, where the
+ * crosshead changes its side of the guide. Between them every quantity is smooth.
  */
 public final class BreakAngles {
 
@@ -15,53 +19,63 @@ public final class BreakAngles {
 
     /** Those of one throw, in its own crank angle: rad, rising, in [0, 2π). */
     public static double[] ofThrow(RunningMachine running, int throwIndex) {
-        return sorted(collect(running, throwIndex, throwIndex, new double[0]));
+        double[] steps = steps(running, throwIndex);
+        boolean friction =
+                running.throwsInOrder().get(throwIndex).body().friction().guideCoefficient() != 0;
+        return friction ? sorted(DoubleStream.concat(stream(steps), guideChanges(running, throwIndex, steps))) : steps;
     }
 
     /** Those of all throws, in the crank angle of one of them. */
     public static double[] ofMachine(RunningMachine running, int shown) {
-        double[] all = new double[0];
-        for (int i = 0; i < running.throwsInOrder().size(); i++) {
-            all = collect(running, shown, i, all);
-        }
-        return sorted(all);
-    }
-
-    /** Those of all throws and the joints of their pressure curves: what an integral over the revolution is split at. */
-    static double[] forIntegrals(RunningMachine running, int shown) {
-        double[] all = ofMachine(running, shown);
+        DoubleStream all = DoubleStream.empty();
         for (int i = 0; i < running.throwsInOrder().size(); i++) {
             double shift = running.angleBetween(shown, i);
-            for (PressureCurve curve : running.throwsInOrder().get(i).curves()) {
-                double[] joints = curve.joints();
-                int before = all.length;
-                all = Arrays.copyOf(all, before + joints.length);
-                for (int k = 0; k < joints.length; k++) {
-                    all[before + k] = Angles.wrap(joints[k] - shift);
-                }
-            }
+            all = DoubleStream.concat(all, stream(ofThrow(running, i)).map(angle -> Angles.wrap(angle - shift)));
         }
         return sorted(all);
     }
 
-    private static double[] collect(RunningMachine running, int shown, int index, double[] before) {
-        RunningThrow t = running.throwsInOrder().get(index);
-        int events = t.curves().stream().mapToInt(c -> c.events().size()).sum();
-        double[] all = Arrays.copyOf(before, before.length + 2 + events);
-        int at = before.length;
-        double shift = running.angleBetween(shown, index);
-        all[at++] = Angles.wrap(-shift);
-        all[at++] = Angles.wrap(t.body().linkage().crankEndDeadCentre(running.rotation()) - shift);
-        for (PressureCurve curve : t.curves()) {
-            for (ValveEvent event : curve.events()) {
-                all[at++] = Angles.wrap(event.crankAngle() - shift);
-            }
-        }
-        return all;
+    /** Those of one throw and the joints of its pressure curves: what an integral over the revolution is split at. */
+    static double[] forIntegrals(RunningMachine running, int throwIndex) {
+        DoubleStream joints = running.throwsInOrder().get(throwIndex).curves().stream()
+                .flatMapToDouble(curve -> stream(curve.joints()));
+        return sorted(DoubleStream.concat(stream(ofThrow(running, throwIndex)), joints));
     }
 
-    private static double[] sorted(double[] angles) {
-        Arrays.sort(angles);
+    /** Dead centres and valve events. */
+    private static double[] steps(RunningMachine running, int throwIndex) {
+        RunningThrow t = running.throwsInOrder().get(throwIndex);
+        DoubleStream deadCentres = DoubleStream.of(0, t.body().linkage().crankEndDeadCentre(running.rotation()));
+        DoubleStream events = t.curves().stream()
+                .map(PressureCurve::events)
+                .flatMap(List::stream)
+                .mapToDouble(ValveEvent::crankAngle);
+        return sorted(DoubleStream.concat(deadCentres, events));
+    }
+
+    /** Where the guide force changes its sign, |N| and with it the guide's friction bend. */
+    private static DoubleStream guideChanges(RunningMachine running, int throwIndex, double[] steps) {
+        RunningThrow t = running.throwsInOrder().get(throwIndex);
+        Sweep sweep = Sweep.wholeTurn(t.body().linkage(), running.rotation(), 0, Trace.STATIONS);
+        ThrowStations stations =
+                new ThrowStations(t, sweep, running.machine().site().framePressure(), List.of());
+        double[] speed = new double[Trace.STATIONS];
+        Arrays.fill(speed, running.meanSpeed());
+        stations.solve(speed, new double[Trace.STATIONS]);
+        ThrowInstant instant = new ThrowInstant(running, throwIndex);
+        Trace guide = new Trace(
+                (angle, side) -> instant.turnTo(angle, side).at(Column.GUIDE_FORCE),
+                stations.column(Column.GUIDE_FORCE),
+                steps);
+        return SignChanges.of(guide).stream().mapToDouble(SignChange::crankAngle);
+    }
+
+    private static DoubleStream stream(double[] angles) {
+        return Arrays.stream(angles);
+    }
+
+    private static double[] sorted(DoubleStream unsorted) {
+        double[] angles = unsorted.sorted().toArray();
         int kept = 0;
         for (double angle : angles) {
             // angles of two throws that mean the same instant differ by rounding; just below a turn is angle 0

@@ -56,16 +56,19 @@ public record Summary(
         for (int c = 0; c < running.throwsInOrder().get(shown).chambers().size(); c++) {
             pressures.add(Extremes.of(traces.pressure(c)));
         }
-        TurnMeans means = new TurnMeans(running, shown);
+        List<TurnMeans> means = new ArrayList<>();
+        for (int i = 0; i < running.throwsInOrder().size(); i++) {
+            means.add(new TurnMeans(running, i));
+        }
         return new Summary(
                 traces.revolution(),
                 extremes,
                 List.copyOf(pressures),
                 Reversal.of(Traces.rodLoad(traces.revolution())),
-                means.throwTorque(),
-                means.shaftTorque(),
-                flows(running, shown, means),
-                machineFlows(running, shown, means),
+                means.get(shown).torque(),
+                means.stream().mapToDouble(TurnMeans::torque).sum(),
+                flows(running, shown, means.get(shown)),
+                machineFlows(running, means),
                 Notes.of(running, shown));
     }
 
@@ -77,12 +80,10 @@ public record Summary(
                 means.power());
     }
 
-    private static StageFlows machineFlows(RunningMachine running, int shown, TurnMeans known) {
-        StageFlows sum = flows(running, shown, known);
-        for (int i = 0; i < running.throwsInOrder().size(); i++) {
-            if (i != shown) {
-                sum = add(sum, flows(running, i, new TurnMeans(running, i)));
-            }
+    private static StageFlows machineFlows(RunningMachine running, List<TurnMeans> means) {
+        StageFlows sum = flows(running, 0, means.get(0));
+        for (int i = 1; i < means.size(); i++) {
+            sum = add(sum, flows(running, i, means.get(i)));
         }
         return sum;
     }

@@ -10,9 +10,10 @@ import throwbench.solver.chamber.PressureCurve;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.machine.Chamber;
 import throwbench.solver.mechanism.Angles;
+import throwbench.solver.mechanism.Approach;
 
 /**
- * Means over the revolution by Gauss–Legendre quadrature between the break angles, so that no kink or step spoils them:
+ * Means of one throw over the revolution by Gauss–Legendre quadrature between the break angles, so that no kink or step spoils them:
  * independent of the number of stations.
  */
 final class TurnMeans {
@@ -27,23 +28,18 @@ final class TurnMeans {
 
     private static final double SHORT_PIECE = Angles.TURN / 72;
 
-    private final RunningMachine running;
-    private final int shown;
-    private double throwTorque;
-    private double shaftTorque;
-    /** Mean power of each chamber of the shown throw, W, positive when the gas takes it up. */
+    private final RunningThrow running;
+    private double torque;
+    /** Mean power of each chamber, W, positive when the gas takes it up. */
     private final double[] chamberPower;
 
-    TurnMeans(RunningMachine running, int shown) {
-        this.running = running;
-        this.shown = shown;
-        this.chamberPower =
-                new double[running.throwsInOrder().get(shown).chambers().size()];
-        integrate(BreakAngles.forIntegrals(running, shown));
+    TurnMeans(RunningMachine machine, int index) {
+        this.running = machine.throwsInOrder().get(index);
+        this.chamberPower = new double[running.chambers().size()];
+        integrate(new ThrowInstant(machine, index), BreakAngles.forIntegrals(machine, index));
     }
 
-    private void integrate(double[] breaks) {
-        Instant instant = new Instant(running, shown);
+    private void integrate(ThrowInstant instant, double[] breaks) {
         GaussIntegratorFactory rules = new GaussIntegratorFactory();
         for (int i = 0; i < breaks.length; i++) {
             double from = breaks[i];
@@ -58,44 +54,36 @@ final class TurnMeans {
         }
     }
 
-    private void add(GaussIntegrator rule, Instant instant) {
-        RunningThrow t = running.throwsInOrder().get(shown);
+    private void add(GaussIntegrator rule, ThrowInstant instant) {
         for (int i = 0; i < rule.getNumberOfPoints(); i++) {
             double weight = rule.getWeight(i) / Angles.TURN;
-            instant.turnTo(rule.getPoint(i));
-            throwTorque += weight * instant.at(Column.THROW_TORQUE);
-            shaftTorque += weight * instant.at(Column.SHAFT_TORQUE);
+            instant.turnTo(rule.getPoint(i), Approach.JUST_AFTER);
+            torque += weight * instant.at(Column.THROW_TORQUE);
             double speed = instant.at(Column.VELOCITY);
             for (int c = 0; c < chamberPower.length; c++) {
-                ChamberVolume volume = t.volumes().get(c);
+                ChamberVolume volume = running.volumes().get(c);
                 double growth = volume.side() == Side.HEAD ? volume.area() * speed : -volume.area() * speed;
-                chamberPower[c] -= weight * instant.pressure(shown, c) * growth;
+                chamberPower[c] -= weight * instant.pressure(c) * growth;
             }
         }
     }
 
-    /** Mean torque of the shown throw, N·m. */
-    double throwTorque() {
-        return throwTorque;
+    /** Mean torque of the throw, N·m. */
+    double torque() {
+        return torque;
     }
 
-    /** Mean torque of the shaft, N·m. */
-    double shaftTorque() {
-        return shaftTorque;
-    }
-
-    /** Indicated power of the shown throw by stage, W, positive when the machine absorbs it; without the loose chambers. */
+    /** Indicated power by stage, W, positive when the machine absorbs it; without the loose chambers. */
     Map<String, Double> powerByStage() {
         Map<String, Double> byStage = new TreeMap<>();
-        RunningThrow t = running.throwsInOrder().get(shown);
         for (int c = 0; c < chamberPower.length; c++) {
             double power = chamberPower[c];
-            t.chambers().get(c).stage().ifPresent(stage -> byStage.merge(stage, power, Double::sum));
+            running.chambers().get(c).stage().ifPresent(stage -> byStage.merge(stage, power, Double::sum));
         }
         return byStage;
     }
 
-    /** Indicated power of the shown throw, W, every chamber counted. */
+    /** Indicated power, W, every chamber counted. */
     double power() {
         double sum = 0;
         for (double power : chamberPower) {

@@ -18,12 +18,12 @@ import net.jqwik.api.Property;
 import net.jqwik.api.Provide;
 import net.jqwik.api.constraints.DoubleRange;
 
-/** Identities of thermodynamics that any equation of state must obey; derivatives by central differences. */
+/** Identities of thermodynamics that any equation of state must obey; derivatives by differences of fourth order. */
 class RealGasPropertyTest {
 
     private static final double R = PerfectGas.MOLAR_GAS_CONSTANT;
 
-    /** Relative step: third derivatives cost 1e-8 of a quantity, rounding 1e-10. */
+    /** Relative step: rounding costs 1e-10; near the critical point, where quantities bend within 1 %, the order 1e-8. */
     private static final double STEP = 1e-4;
 
     @Provide
@@ -64,14 +64,24 @@ class RealGasPropertyTest {
 
     private static double slope(DoubleUnaryOperator f, double x) {
         double h = STEP * x;
-        return (f.applyAsDouble(x + h) - f.applyAsDouble(x - h)) / (2 * h);
+        double near = f.applyAsDouble(x + h) - f.applyAsDouble(x - h);
+        double far = f.applyAsDouble(x + 2 * h) - f.applyAsDouble(x - 2 * h);
+        return (8 * near - far) / (12 * h);
     }
 
-    /** The state, or an abandoned try where it is not one gas all around. */
+    /**
+     * The state, or an abandoned try where it is not gas all around, or so near the critical point that the heat capacity is
+     * many times the ideal one and a difference quotient says nothing.
+     */
     private static GasState state(RealGas gas, double temperature, double pressure) {
-        Assume.that(
-                gas.at(temperature * (1 - STEP), pressure * (1 + STEP)).value().isPresent());
-        return gas.at(temperature, pressure).value().orElseThrow();
+        for (double t : new double[] {1 - 3 * STEP, 1 + 3 * STEP}) {
+            for (double p : new double[] {1 - 3 * STEP, 1 + 3 * STEP}) {
+                Assume.that(gas.at(temperature * t, pressure * p).value().isPresent());
+            }
+        }
+        GasState state = gas.at(temperature, pressure).value().orElseThrow();
+        Assume.that(state.heatCapacityRatio() < 3);
+        return state;
     }
 
     private static double compressibility(RealGas gas, double temperature, double pressure) {
@@ -129,7 +139,7 @@ class RealGasPropertyTest {
         GasState state = state(gas, temperature, pressure);
         double slope = slope(t -> gas.at(t, pressure).value().orElseThrow().enthalpyDeparture(), temperature);
         double ideal = R * Composition.of(mixture).heatCapacity(temperature);
-        assertEquals(state.heatCapacity() - ideal, slope, 1e-4 * ideal);
+        assertEquals(state.heatCapacity() - ideal, slope, 1e-5 * state.heatCapacity());
     }
 
     @Property
@@ -143,7 +153,7 @@ class RealGasPropertyTest {
         double byT = z + temperature * slope(t -> compressibility(gas, t, pressure), temperature);
         double byP = z - pressure * slope(p -> compressibility(gas, temperature, p), pressure);
         double constantVolume = state.heatCapacity() / state.heatCapacityRatio();
-        assertEquals(R * byT * byT / byP, state.heatCapacity() - constantVolume, 1e-4 * state.heatCapacity());
+        assertEquals(R * byT * byT / byP, state.heatCapacity() - constantVolume, 1e-5 * state.heatCapacity());
     }
 
     @Property

@@ -5,8 +5,10 @@ import static org.junit.jupiter.api.Assertions.assertThrows;
 import static throwbench.solver.fluid.FluidCheckValuesTest.alone;
 import static throwbench.solver.fluid.FluidCheckValuesTest.known;
 
+import java.io.IOException;
 import java.util.Collections;
 import java.util.Map;
+import java.util.Optional;
 import java.util.stream.IntStream;
 import org.apache.commons.math3.analysis.integration.SimpsonIntegrator;
 import org.junit.jupiter.api.Test;
@@ -99,6 +101,38 @@ class RealGasTest {
                         .toList());
     }
 
+    // the dew point
+
+    /** Suction from an evaporator is saturated vapour; the vapour pressures are those of reference equations. */
+    @Test
+    void saturatedVapourIsTakenAndAboveItsPressureIsNot() throws IOException {
+        for (CheckRow row : CheckRow.all()) {
+            if (row.quantity().equals("Lee-Kesler vapour pressure")) {
+                RealGas gas = RealGas.of(alone(row.text("gas")));
+                assertEquals(
+                        "", gas.compressibility(row.number("T_K"), row.value()).reason(), row::toString);
+                assertEquals(
+                        Optional.empty(),
+                        gas.compressibility(row.number("T_K"), 1.15 * row.value())
+                                .value(),
+                        row::toString);
+            }
+        }
+    }
+
+    /** Biogas from a wet scrubber: its water is at the vapour pressure of water at 40 degC by the table of liquids. */
+    @Test
+    void gasSaturatedWithWaterIsTakenAndTwiceItsPressureIsNot() {
+        double pressure = 1.1e5;
+        double water = LiquidTable.find("water 40 degC").orElseThrow().liquid().vapourPressure() / pressure;
+        GasMixture saturated = new GasMixture(
+                Map.of("methane", 0.62 * (1 - water), "carbon dioxide", 0.38 * (1 - water), "water", water), true);
+        assertEquals("", RealGas.of(saturated).density(313.15, pressure).reason());
+        assertEquals(
+                "the state 313.2 K, 2.200 bar a is beyond the dew point: water vapour condenses",
+                RealGas.of(saturated).density(313.15, 2 * pressure).reason());
+    }
+
     // refusals
 
     @Test
@@ -128,7 +162,7 @@ class RealGasTest {
     @Test
     void condensingPartIsNamed() {
         assertEquals(
-                "the state 300.0 K, 40.00 bar a is beyond the dew point, not all gas: the liquid would be mostly n-pentane",
+                "the state 300.0 K, 40.00 bar a is beyond the dew point: n-pentane condenses",
                 RealGas.of(new GasMixture(Map.of("methane", 0.95, "n-pentane", 0.05), true))
                         .compressibility(300, 40e5)
                         .reason());

@@ -2,6 +2,7 @@ package throwbench.solver.trial;
 
 import net.jqwik.api.Arbitraries;
 import net.jqwik.api.Arbitrary;
+import net.jqwik.api.RandomDistribution;
 import net.jqwik.api.Tuple;
 
 /** Random numbers with all their digits; now and then one of their bounds. */
@@ -15,6 +16,7 @@ public final class Numbers {
                 .between(least, greatest)
                 .ofScale(15)
                 .shrinkTowards(least)
+                .withDistribution(RandomDistribution.uniform())
                 .withoutEdgeCases();
         return Arbitraries.frequencyOf(
                         Tuple.of(1, Arbitraries.just(least)),

@@ -159,6 +159,12 @@ public final class Node {
         return null;
     }
 
+    /** The text of a member; empty where there is none, or none that is a text. */
+    public String text(String key) {
+        Node member = member(key);
+        return member != null && member.type == Type.TEXT ? member.text : "";
+    }
+
     /** Its key path: {@code throws[0].chambers[1].bore}. */
     public String path() {
         if (parent == null) {

@@ -20,8 +20,7 @@ final class Json {
 
     Json() throws IOException {
         generator = new JsonFactory().createGenerator(bytes, JsonEncoding.UTF8);
-        generator.setPrettyPrinter(
-                new DefaultPrettyPrinter().withObjectIndenter(new DefaultIndenter("  ", "\n")));
+        generator.setPrettyPrinter(new DefaultPrettyPrinter().withObjectIndenter(new DefaultIndenter("  ", "\n")));
     }
 
     /** Hands the whole text over. */

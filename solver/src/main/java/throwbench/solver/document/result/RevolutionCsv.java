@@ -51,10 +51,8 @@ public final class RevolutionCsv implements Written {
 
     /** RFC 4180: a field with a comma, a quote or a line break stands in quotes, its own quotes doubled. */
     private static void quote(String field, StringBuilder into) {
-        boolean plain = field.indexOf(',') < 0
-                && field.indexOf('"') < 0
-                && field.indexOf('\n') < 0
-                && field.indexOf('\r') < 0;
+        boolean plain =
+                field.indexOf(',') < 0 && field.indexOf('"') < 0 && field.indexOf('\n') < 0 && field.indexOf('\r') < 0;
         if (plain) {
             into.append(field);
         } else {

@@ -91,30 +91,39 @@ public final class RevolutionJson implements Written {
                 for (int c = 0; c < chambers.size(); c++) {
                     Extremes pressures = summary.pressures().get(c);
                     String name = Column.pressureName(chambers.get(c).name());
-                    writeExtremes(json, name, pressures.least(), pressures.greatest());
+                    writeExtremes(json, name, InFile.of(pressures.least()), InFile.of(pressures.greatest()));
                 }
             }
             if (column == Column.CRANK_ANGLE) {
-                double last = Math.toRadians(table.at(0, table.stations() - 1));
-                writeExtremes(json, column.fileName(), new Extreme(0, 0), new Extreme(Math.toDegrees(last), last));
+                double last = table.at(0, table.stations() - 1);
+                writeExtremes(json, column.fileName(), new InFile(0, 0), new InFile(last, last));
             } else {
                 Extremes found = summary.extremes(column);
-                writeExtremes(json, column.fileName(), inFile(column, found.least()), inFile(column, found.greatest()));
+                InFile least = new InFile(column.inFile(found.least().value()), degrees(found.least()));
+                InFile greatest = new InFile(column.inFile(found.greatest().value()), degrees(found.greatest()));
+                writeExtremes(json, column.fileName(), least, greatest);
             }
         }
         json.end();
     }
 
-    private static Extreme inFile(Column column, Extreme extreme) {
-        return new Extreme(column.inFile(extreme.value()), extreme.crankAngle());
+    /** An extreme as files have it, its angle in degrees. */
+    private record InFile(double value, double degrees) {
+        static InFile of(Extreme extreme) {
+            return new InFile(extreme.value(), RevolutionJson.degrees(extreme));
+        }
     }
 
-    private static void writeExtremes(Json json, String name, Extreme least, Extreme greatest) throws IOException {
+    private static double degrees(Extreme extreme) {
+        return Math.toDegrees(extreme.crankAngle());
+    }
+
+    private static void writeExtremes(Json json, String name, InFile least, InFile greatest) throws IOException {
         json.begin(name);
         json.number("min", least.value());
-        json.degrees("minAt_deg", least.crankAngle());
+        json.number("minAt_deg", least.degrees());
         json.number("max", greatest.value());
-        json.degrees("maxAt_deg", greatest.crankAngle());
+        json.number("maxAt_deg", greatest.degrees());
         json.end();
     }
 

@@ -22,8 +22,11 @@ final class RevolutionTable {
     }
 
     private void addPressures(Revolution revolution) {
-        List<Chamber> chambers =
-                revolution.running().throwsInOrder().get(revolution.shownThrow()).chambers();
+        List<Chamber> chambers = revolution
+                .running()
+                .throwsInOrder()
+                .get(revolution.shownThrow())
+                .chambers();
         for (int c = 0; c < chambers.size(); c++) {
             String name = Column.pressureName(chambers.get(c).name());
             add(name, revolution.readPressure(c, new double[revolution.count()]));

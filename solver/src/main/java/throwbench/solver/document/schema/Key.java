@@ -19,49 +19,48 @@ public final class Key {
     private final String name;
     private final Kind kind;
     private final String meaning;
-    private final Rule rule;
-    private final Shape shape;
+    // set while a key is declared, by the methods below that give a changed copy; never afterwards
+    private @Nullable Dimension dimension;
+    private Range range = Range.ANY;
+    private boolean required;
+    private String otherwise = "";
+    private OptionalDouble defaultValue = OptionalDouble.empty();
+    private List<String> words = List.of();
+    private @Nullable NameSpace declares;
+    private @Nullable NameSpace refersTo;
+    private Map<String, Map<String, Key>> variants = Map.of();
+    private @Nullable Key item;
+    private int leastItems;
 
-    private Key(String name, Kind kind, String meaning, Rule rule, Shape shape) {
-        this.name = name;
+    private Key(Kind kind, String name, String meaning) {
         this.kind = kind;
+        this.name = name;
         this.meaning = meaning;
-        this.rule = rule;
-        this.shape = shape;
     }
 
-    /** What a value must obey, and what stands in for a missing one. */
-    private record Rule(
-            @Nullable Dimension dimension,
-            Range range,
-            boolean required,
-            String otherwise,
-            OptionalDouble defaultValue,
-            List<String> words,
-            @Nullable NameSpace declares,
-            @Nullable NameSpace refersTo) {
-
-        static final Rule FREE = new Rule(null, Range.ANY, false, "", OptionalDouble.empty(), List.of(), null, null);
-    }
-
-    /** What stands inside: children by variant ("" where there is but one), and the item of a list or map. */
-    private record Shape(
-            Map<String, Map<String, Key>> variants,
-            @Nullable Key item,
-            int least) {
-
-        static final Shape NONE = new Shape(Map.of(), null, 0);
-    }
-
-    static Key quantity(String name, Dimension dimension, String meaning) {
-        Rule free = Rule.FREE;
-        Rule rule =
-                new Rule(dimension, free.range, false, "", free.defaultValue, free.words, free.declares, free.refersTo);
-        return new Key(name, Kind.QUANTITY, meaning, rule, Shape.NONE);
+    private Key(Key other) {
+        this(other.kind, other.name, other.meaning);
+        dimension = other.dimension;
+        range = other.range;
+        required = other.required;
+        otherwise = other.otherwise;
+        defaultValue = other.defaultValue;
+        words = other.words;
+        declares = other.declares;
+        refersTo = other.refersTo;
+        variants = other.variants;
+        item = other.item;
+        leastItems = other.leastItems;
     }
 
     static Key of(Kind kind, String name, String meaning) {
-        return new Key(name, kind, meaning, Rule.FREE, Shape.NONE);
+        return new Key(kind, name, meaning);
+    }
+
+    static Key quantity(String name, Dimension dimension, String meaning) {
+        Key key = new Key(Kind.QUANTITY, name, meaning);
+        key.dimension = dimension;
+        return key;
     }
 
     static Key choice(String name, List<String> words, String meaning) {
@@ -69,8 +68,28 @@ public final class Key {
     }
 
     static Key object(String name, String meaning, Key... children) {
-        return new Key(
-                name, Kind.OBJECT, meaning, Rule.FREE, new Shape(Map.of("", byName(List.of(children))), null, 0));
+        Key key = new Key(Kind.OBJECT, name, meaning);
+        // one variant without a word
+        key.variants = Map.of("", byName(List.of(children)));
+        return key;
+    }
+
+    static Key list(String name, String meaning, Key item) {
+        return nest(Kind.LIST, name, meaning, item);
+    }
+
+    static Key map(String name, String meaning, Key item) {
+        return nest(Kind.MAP, name, meaning, item);
+    }
+
+    static Key pair(String name, Dimension dimension, String meaning) {
+        return nest(Kind.PAIR, name, meaning, quantity("", dimension, meaning).in(Range.above(0)));
+    }
+
+    private static Key nest(Kind kind, String name, String meaning, Key item) {
+        Key key = new Key(kind, name, meaning);
+        key.item = item;
+        return key;
     }
 
     /** What a word of {@code kind} brings with it. */
@@ -91,20 +110,9 @@ public final class Key {
             children.putAll(byName(variant.keys()));
             shape.put(variant.word(), children);
         }
-        return new Key(name, Kind.VARIANT, meaning, Rule.FREE, new Shape(shape, null, 0));
-    }
-
-    static Key list(String name, String meaning, Key item) {
-        return new Key(name, Kind.LIST, meaning, Rule.FREE, new Shape(Map.of(), item, 0));
-    }
-
-    static Key map(String name, String meaning, Key item) {
-        return new Key(name, Kind.MAP, meaning, Rule.FREE, new Shape(Map.of(), item, 0));
-    }
-
-    static Key pair(String name, Dimension dimension, String meaning) {
-        Key end = quantity("", dimension, meaning).in(Range.above(0)).required();
-        return new Key(name, Kind.PAIR, meaning, Rule.FREE, new Shape(Map.of(), end, 2));
+        Key key = new Key(Kind.VARIANT, name, meaning);
+        key.variants = shape;
+        return key;
     }
 
     private static Map<String, Key> byName(List<Key> keys) {
@@ -117,98 +125,59 @@ public final class Key {
         return children;
     }
 
-    Key in(Range range) {
-        return with(new Rule(
-                rule.dimension,
-                range,
-                rule.required,
-                rule.otherwise,
-                rule.defaultValue,
-                rule.words,
-                rule.declares,
-                rule.refersTo));
+    Key in(Range allowed) {
+        Key copy = new Key(this);
+        copy.range = allowed;
+        return copy;
     }
 
     Key required() {
-        return with(new Rule(
-                rule.dimension,
-                rule.range,
-                true,
-                rule.otherwise,
-                rule.defaultValue,
-                rule.words,
-                rule.declares,
-                rule.refersTo));
+        Key copy = new Key(this);
+        copy.required = true;
+        return copy;
     }
 
-    /** Other words that may stand in place of the value. */
-    Key orWord(List<String> words) {
-        return with(new Rule(
-                rule.dimension,
-                rule.range,
-                rule.required,
-                rule.otherwise,
-                rule.defaultValue,
-                words,
-                rule.declares,
-                rule.refersTo));
+    /** Words of a choice, or words that may stand in place of the value. */
+    Key orWord(List<String> others) {
+        Key copy = new Key(this);
+        copy.words = List.copyOf(others);
+        return copy;
     }
 
     Key declares(NameSpace space) {
-        return with(new Rule(
-                rule.dimension,
-                rule.range,
-                rule.required,
-                rule.otherwise,
-                rule.defaultValue,
-                rule.words,
-                space,
-                rule.refersTo));
+        Key copy = new Key(this);
+        copy.declares = space;
+        return copy;
     }
 
     Key refersTo(NameSpace space) {
-        return with(new Rule(
-                rule.dimension,
-                rule.range,
-                rule.required,
-                rule.otherwise,
-                rule.defaultValue,
-                rule.words,
-                rule.declares,
-                space));
+        Key copy = new Key(this);
+        copy.refersTo = space;
+        return copy;
     }
 
     /** The text that a missing value stands for; a quantity's is read at once. */
     Key otherwise(String text) {
-        OptionalDouble value = OptionalDouble.empty();
+        Key copy = otherwiseSaid(text);
         if (kind == Kind.QUANTITY || kind == Kind.CLEARANCE) {
             // no default is a gauge pressure: the ambient pressure plays no part
-            Dimension read = rule.dimension == null ? Dimension.SHARE : rule.dimension;
-            value = OptionalDouble.of(((Quantity) QuantityText.read(text, read, 0)).value());
+            Dimension read = dimension == null ? Dimension.SHARE : dimension;
+            copy.defaultValue = OptionalDouble.of(((Quantity) QuantityText.read(text, read, 0)).value());
         }
-        return with(new Rule(
-                rule.dimension, rule.range, rule.required, text, value, rule.words, rule.declares, rule.refersTo));
+        return copy;
     }
 
     /** In words, where the default depends on other keys. */
-    Key otherwiseSaid(String words) {
-        return with(new Rule(
-                rule.dimension,
-                rule.range,
-                rule.required,
-                words,
-                OptionalDouble.empty(),
-                rule.words,
-                rule.declares,
-                rule.refersTo));
+    Key otherwiseSaid(String text) {
+        Key copy = new Key(this);
+        copy.otherwise = text;
+        return copy;
     }
 
     Key atLeast(int items) {
-        return new Key(name, kind, meaning, rule, new Shape(shape.variants, shape.item, items));
-    }
-
-    private Key with(Rule other) {
-        return new Key(name, kind, meaning, other, shape);
+        Key copy = new Key(this);
+        copy.leastItems = items;
+        return copy;
     }
 
     /** As the file spells it; empty for an item of a list or map. */
@@ -227,60 +196,60 @@ public final class Key {
 
     /** Dimension of a quantity; empty for everything else, a clearance too: it is a share or a volume. */
     public Optional<Dimension> dimension() {
-        return Optional.ofNullable(rule.dimension);
+        return Optional.ofNullable(dimension);
     }
 
     public Range range() {
-        return rule.range;
+        return range;
     }
 
     /** Whether the object in which it stands must have it. */
     public boolean isRequired() {
-        return rule.required;
+        return required;
     }
 
     /** The text that a missing value stands for, or words where it depends on other keys; may be empty. */
     public String otherwise() {
-        return rule.otherwise;
+        return otherwise;
     }
 
     /** SI value of a missing quantity, where it does not depend on other keys. */
     public OptionalDouble defaultValue() {
-        return rule.defaultValue;
+        return defaultValue;
     }
 
     /** Words of a choice, or words that may stand in a quantity's place. */
     public List<String> words() {
-        return rule.words;
+        return words;
     }
 
     /** The space in which its text (of a map: its member names) declares a name. */
     public Optional<NameSpace> declares() {
-        return Optional.ofNullable(rule.declares);
+        return Optional.ofNullable(declares);
     }
 
     /** The space in which its text (of a map: its member names) must be declared. */
     public Optional<NameSpace> refersTo() {
-        return Optional.ofNullable(rule.refersTo);
+        return Optional.ofNullable(refersTo);
     }
 
     /** Fewest items of a list. */
     public int leastItems() {
-        return shape.least;
+        return leastItems;
     }
 
     /** What each element of a list, end of a pair or member of a map is. */
     public Key item() {
-        return Objects.requireNonNull(shape.item, name);
+        return Objects.requireNonNull(item, name);
     }
 
     /** The words of a variant's {@code kind}, or one empty word for an object. */
     public Collection<String> variants() {
-        return shape.variants.keySet();
+        return variants.keySet();
     }
 
     /** Children of an object, or of a variant's kind, in the order of the page; none for a word it does not know. */
     public Map<String, Key> children(String variant) {
-        return shape.variants.getOrDefault(variant, Map.of());
+        return variants.getOrDefault(variant, Map.of());
     }
 }
