@@ -38,6 +38,7 @@ public final class GaugeColumn extends Region implements View {
     private @Nullable GaugeLayout layout;
     private boolean stale = true;
     private double drawnAngle = Double.NaN;
+    private long stillDrawings;
 
     public GaugeColumn() {
         setId("gauge-column");
@@ -100,7 +101,13 @@ public final class GaugeColumn extends Region implements View {
         drawnAngle = angle;
     }
 
+    /** How often what stands still was drawn: the cost that a moving crank must not have. */
+    long stillDrawings() {
+        return stillDrawings;
+    }
+
     private void drawStill(Shown state) {
+        stillDrawings++;
         List<Signal> signals = Gauges.usual(state.shownThrow());
         for (Column column : added) {
             Signal signal = new Signal.OfColumn(column);
@@ -130,13 +137,14 @@ public final class GaugeColumn extends Region implements View {
 
     @Override
     protected void setWidth(double width) {
+        // parents resize at every layout, mostly to the size it has
+        stale |= width != getWidth();
         super.setWidth(width);
-        stale = true;
     }
 
     @Override
     protected void setHeight(double height) {
+        stale |= height != getHeight();
         super.setHeight(height);
-        stale = true;
     }
 }

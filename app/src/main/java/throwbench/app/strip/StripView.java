@@ -8,6 +8,7 @@ import java.util.OptionalDouble;
 import javafx.scene.AccessibleRole;
 import javafx.scene.Cursor;
 import javafx.scene.canvas.Canvas;
+import javafx.scene.control.Label;
 import javafx.scene.input.KeyEvent;
 import javafx.scene.input.MouseEvent;
 import javafx.scene.layout.Region;
@@ -18,6 +19,7 @@ import throwbench.app.drawing.FxPen;
 import throwbench.app.drawing.Palette;
 import throwbench.app.drawing.PaletteStyle;
 import throwbench.app.drawing.Readout;
+import throwbench.app.drawing.Signal;
 import throwbench.app.drawing.View;
 import throwbench.solver.mechanism.Angles;
 import throwbench.solver.revolution.Column;
@@ -33,6 +35,9 @@ public final class StripView extends Region implements View {
     /** Scrubbing by mouse goes to tenths of a degree: what is shown is then exactly where the crank stands. */
     private static final double TENTHS = 10;
 
+    /** Points from an event's mark within which the mouse is on it. */
+    private static final double NEAR = 4;
+
     private final Playhead playhead;
     private final Canvas still = new Canvas();
     private final Canvas values = new Canvas();
@@ -41,6 +46,7 @@ public final class StripView extends Region implements View {
     private final FxPen valuePen = new FxPen(values.getGraphicsContext2D());
     private final FxPen cursorPen = new FxPen(cursor.getGraphicsContext2D());
     private final Region focusFrame = new Region();
+    private final Label hint = new Label();
     private final PlaceField place;
     private final StripPainter painter = new StripPainter();
     private final CursorPainter cursorPainter = new CursorPainter();
@@ -50,6 +56,7 @@ public final class StripView extends Region implements View {
     private @Nullable StripPlot plot;
     private boolean stale = true;
     private double drawnAngle = Double.NaN;
+    private long stillDrawings;
     private boolean scrubbing;
 
     public StripView(Playhead playhead) {
@@ -70,10 +77,13 @@ public final class StripView extends Region implements View {
                         .toExternalForm());
         focusFrame.getStyleClass().add("strip-focus");
         focusFrame.visibleProperty().bind(focusVisibleProperty());
-        for (Region none : List.of(focusFrame)) {
-            none.setMouseTransparent(true);
-        }
-        getChildren().addAll(still, values, cursor, focusFrame, place);
+        focusFrame.setMouseTransparent(true);
+        hint.setId("strip-hint");
+        hint.getStyleClass().add("strip-message");
+        hint.setMouseTransparent(true);
+        hint.setManaged(false);
+        hint.setVisible(false);
+        getChildren().addAll(still, values, cursor, focusFrame, hint, place);
         setFocusTraversable(true);
         setAccessibleRole(AccessibleRole.SLIDER);
         setAccessibleText("Revolution strip");
@@ -85,7 +95,8 @@ public final class StripView extends Region implements View {
         setOnMousePressed(this::press);
         setOnMouseDragged(this::drag);
         setOnMouseReleased(e -> scrubbing = false);
-        setOnMouseMoved(e -> setCursor(inPlot(e) ? Cursor.H_RESIZE : Cursor.DEFAULT));
+        setOnMouseMoved(this::hover);
+        setOnMouseExited(e -> hint.setVisible(false));
         setOnKeyPressed(this::key);
         wear(palette);
     }
@@ -144,7 +155,13 @@ public final class StripView extends Region implements View {
         drawnAngle = angle;
     }
 
+    /** How often what stands still was drawn: the cost that a moving crank must not have. */
+    long stillDrawings() {
+        return stillDrawings;
+    }
+
     private void drawStill(Shown state) {
+        stillDrawings++;
         List<Lane> lanes = Lanes.of(state.shownThrow(), added);
         StripPlot known = plot;
         if (known == null) {
@@ -197,14 +214,15 @@ public final class StripView extends Region implements View {
 
     @Override
     protected void setWidth(double width) {
+        // parents resize at every layout, mostly to the size it has
+        stale |= width != getWidth();
         super.setWidth(width);
-        stale = true;
     }
 
     @Override
     protected void setHeight(double height) {
+        stale |= height != getHeight();
         super.setHeight(height);
-        stale = true;
     }
 
     private boolean inPlot(MouseEvent event) {
@@ -214,8 +232,40 @@ public final class StripView extends Region implements View {
                 && event.getX() <= drawn.layout().right() + 10;
     }
 
+    private Optional<Column> removable(MouseEvent event) {
+        StripPlot drawn = plot;
+        return drawn == null
+                ? Optional.empty()
+                : LegendPainter.removable(drawn, event.getX(), event.getY())
+                        .map(StripTrace::signal)
+                        .filter(Signal.OfColumn.class::isInstance)
+                        .map(s -> ((Signal.OfColumn) s).column());
+    }
+
+    /** Names what stands under the mouse: the events at its angle, or what a click would take off. */
+    private void hover(MouseEvent event) {
+        StripPlot drawn = plot;
+        boolean plotted = inPlot(event);
+        boolean removes = removable(event).isPresent();
+        setCursor(plotted ? Cursor.H_RESIZE : removes ? Cursor.HAND : Cursor.DEFAULT);
+        String words = removes
+                ? "click: take this trace off"
+                : plotted && drawn != null ? drawn.eventsAt(event.getX(), NEAR) : "";
+        hint.setText(words);
+        hint.setVisible(!words.isEmpty());
+        if (!words.isEmpty()) {
+            hint.autosize();
+            double x = Math.min(event.getX() + 14, getWidth() - hint.getWidth() - 4);
+            double y = event.getY() + 18 + hint.getHeight() > getHeight()
+                    ? event.getY() - hint.getHeight() - 8
+                    : event.getY() + 18;
+            hint.relocate(x, y);
+        }
+    }
+
     private void press(MouseEvent event) {
         requestFocus();
+        removable(event).ifPresent(this::removeTrace);
         scrubbing = inPlot(event);
         drag(event);
     }

@@ -3,9 +3,11 @@ package throwbench.solver.revolution;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import throwbench.solver.drive.SpeedCurve;
 import throwbench.solver.machine.DutyPoint;
 import throwbench.solver.machine.Machine;
 import throwbench.solver.mechanism.Angles;
+import throwbench.solver.mechanism.Approach;
 import throwbench.solver.mechanism.Rotation;
 
 /**
@@ -13,8 +15,10 @@ import throwbench.solver.mechanism.Rotation;
  * read from it by a {@link Revolution} or an {@link Instant}.
  *
  * @param throwsInOrder one for each throw of the machine
+ * @param speedCurve ω and α over the crank angle of the first throw
  */
-public record RunningMachine(Machine machine, DutyPoint dutyPoint, List<RunningThrow> throwsInOrder) {
+public record RunningMachine(
+        Machine machine, DutyPoint dutyPoint, List<RunningThrow> throwsInOrder, SpeedCurve speedCurve) {
 
     public RunningMachine {
         throwsInOrder = List.copyOf(throwsInOrder);
@@ -23,18 +27,25 @@ public record RunningMachine(Machine machine, DutyPoint dutyPoint, List<RunningT
     /** Settles a machine at a duty point, or says for every place why it cannot. */
     public static Settling settle(Machine machine, DutyPoint dutyPoint) {
         List<Refusal> refusals = new ArrayList<>();
-        if (!machine.drive().driver().kind().equals("constant-speed")) {
-            refusals.add(new Refusal(
-                    "drive.driver.kind",
-                    machine.drive().driver().kind() + " drivers are not solved by this version; use constant-speed"));
-        }
         List<RunningThrow> running = new ArrayList<>();
         for (int i = 0; i < machine.throwsInOrder().size(); i++) {
             new ThrowSettler(machine, dutyPoint, i, refusals).settle().ifPresent(running::add);
         }
-        return refusals.isEmpty()
-                ? new Settling(Optional.of(new RunningMachine(machine, dutyPoint, running)), List.of())
-                : new Settling(Optional.empty(), List.copyOf(refusals));
+        if (!refusals.isEmpty()) {
+            return new Settling(Optional.empty(), List.copyOf(refusals));
+        }
+        SpeedCurve steady = SpeedCurve.constant(dutyPoint.speed());
+        return VaryingSpeed.settle(new RunningMachine(machine, dutyPoint, running, steady));
+    }
+
+    /** The same machine with another speed over the turn. */
+    RunningMachine turning(SpeedCurve curve) {
+        return new RunningMachine(machine, dutyPoint, throwsInOrder, curve);
+    }
+
+    /** Fills ω and α at crank angles of a throw. */
+    void fillSpeed(int throwIndex, double[] crankAngles, Approach approach, double[] speed, double[] acceleration) {
+        speedCurve.fill(crankAngles, angleBetween(throwIndex, 0), approach, speed, acceleration);
     }
 
     public Rotation rotation() {

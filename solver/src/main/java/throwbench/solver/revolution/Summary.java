@@ -106,8 +106,7 @@ public record Summary(
 
     /** (ω_max − ω_min)/ω_mean. */
     public double speedFluctuation() {
-        Extremes speed = extremes(Column.SHAFT_SPEED);
-        return (speed.greatest().value() - speed.least().value()) / running().meanSpeed();
+        return running().speedCurve().fluctuation();
     }
 
     /** Extremes of a column. */

@@ -29,12 +29,14 @@ final class TurnMeans {
     private static final double SHORT_PIECE = Angles.TURN / 72;
 
     private final RunningThrow running;
+    private final double meanSpeed;
     private double torque;
     /** Mean power of each chamber, W, positive when the gas takes it up. */
     private final double[] chamberPower;
 
     TurnMeans(RunningMachine machine, int index) {
         this.running = machine.throwsInOrder().get(index);
+        this.meanSpeed = machine.meanSpeed();
         this.chamberPower = new double[running.chambers().size()];
         integrate(new ThrowInstant(machine, index), BreakAngles.forIntegrals(machine, index));
     }
@@ -59,7 +61,8 @@ final class TurnMeans {
             double weight = rule.getWeight(i) / Angles.TURN;
             instant.turnTo(rule.getPoint(i), Approach.JUST_AFTER);
             torque += weight * instant.at(Column.THROW_TORQUE);
-            double speed = instant.at(Column.VELOCITY);
+            // power is the work of a turn times turns a second, whatever the speed within the turn: ∮ p dV by the angle
+            double speed = instant.at(Column.VELOCITY) * meanSpeed / instant.speed();
             for (int c = 0; c < chamberPower.length; c++) {
                 ChamberVolume volume = running.volumes().get(c);
                 double growth = volume.side() == Side.HEAD ? volume.area() * speed : -volume.area() * speed;
