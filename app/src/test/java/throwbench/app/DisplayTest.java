@@ -6,6 +6,7 @@ import java.io.IOException;
 import java.net.StandardProtocolFamily;
 import java.net.UnixDomainSocketAddress;
 import java.nio.channels.ServerSocketChannel;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
@@ -61,7 +62,7 @@ class DisplayTest {
         Files.createDirectories(root.resolve("etc"));
         Files.write(
                 root.resolve("etc/ld.so.cache"),
-                "\0\u00fflibgtk-3.so.0\0/opt/x/libgtk-3.so.0\0".getBytes("ISO-8859-1"));
+                "\0\u00fflibgtk-3.so.0\0/opt/x/libgtk-3.so.0\0".getBytes(StandardCharsets.ISO_8859_1));
 
         assertEquals(Optional.empty(), lacking("Linux", "far:0", ""));
     }

@@ -134,6 +134,15 @@ final class FieldInput {
         return put(text, true);
     }
 
+    /** Takes back the last edit of the machine, or makes it again. */
+    void undo(boolean again) {
+        if (again) {
+            bench.redo();
+        } else {
+            bench.undo();
+        }
+    }
+
     private String put(String text, boolean live) {
         String before = text();
         if (text.equals(before)) {

@@ -147,7 +147,7 @@ public final class CommandLine {
         StringBuilder text = new StringBuilder();
         int length = 0;
         for (String part :
-                ("throwbench " + command.synopsis()).replace(" [", "\n[").split("\n")) {
+                ("throwbench " + command.synopsis()).replace(" [", "\n[").split("\n", -1)) {
             boolean breaks = length + 1 + part.length() > TextColumns.PAGE;
             text.append(breaks ? "\n        " : length == 0 ? "" : " ").append(part);
             length = (breaks ? 8 : length + 1) + part.length();

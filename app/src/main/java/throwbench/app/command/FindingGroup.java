@@ -79,7 +79,7 @@ record FindingGroup(List<Finding> findings) {
             String rank = findings.size() == 1 ? "at" : shown.margin().isPresent() ? "worst at" : "greatest at";
             place.add(rank + " \"" + shown.where().duty() + "\"");
         }
-        shown.angle().ifPresent(angle -> place.add("crank angle " + Readable.degrees(angle)));
+        shown.angle().ifPresent(angle -> place.add("crank angle " + ShownValue.degrees(angle)));
         if (!place.isEmpty()) {
             parts.add(String.join(", ", place));
         }
@@ -133,7 +133,7 @@ record FindingGroup(List<Finding> findings) {
         if (value.isEmpty() || least.equals(shown())) {
             return value.isEmpty() ? "" : "the same at all " + findings.size() + " duty points";
         }
-        Readable read = Readable.of(value.getAsDouble(), criterion().unit(), value.getAsDouble());
+        ShownValue read = ShownValue.of(value.getAsDouble(), criterion().unit(), value.getAsDouble());
         return "least of " + findings.size() + " duty points: " + (read.number() + " " + read.unit()).strip() + " at \""
                 + least.where().duty() + "\"";
     }

@@ -58,7 +58,7 @@ final class FindingsText implements Written {
             addDetails(groups.get(i), widths, lines);
         }
         lines.add("");
-        lines.add(answer());
+        lines.addAll(TextColumns.wrap(answer(), 0));
         lines.addAll(TextColumns.wrap(CAUTION, 0));
         out.write((String.join("\n", lines) + "\n").getBytes(StandardCharsets.UTF_8));
     }
@@ -111,11 +111,9 @@ final class FindingsText implements Written {
                 : failed + " of " + judged.size() + " judged findings " + (failed == 1 ? "is" : "are")
                         + " not met; worst: ";
         String after = ", " + Row.margin(worst) + ".";
-        String what = worst.criterion().title() + " of ";
-        String place = FindingGroup.subject(worst.where())
+        String what = worst.criterion().title() + " of " + FindingGroup.subject(worst.where())
                 + (duties.size() > 1 ? " at \"" + worst.where().duty() + "\"" : "");
-        int room = TextColumns.PAGE - before.length() - what.length() - after.length();
-        return before + what + TextColumns.cut(place, room) + after;
+        return before + TextColumns.cut(what, Integer.MAX_VALUE) + after;
     }
 
     /** One row's cells. */
@@ -146,7 +144,7 @@ final class FindingsText implements Written {
             if (value.isEmpty()) {
                 return "-";
             }
-            Readable read = Readable.of(value.getAsDouble(), criterion.unit(), size);
+            ShownValue read = ShownValue.of(value.getAsDouble(), criterion.unit(), size);
             return (read.number() + " " + read.unit()).strip();
         }
 
@@ -158,7 +156,7 @@ final class FindingsText implements Written {
             // against a limit of 0 there is no share, the margin is the difference itself
             return finding.limit().orElse(1) == 0
                     ? cell(finding.margin(), finding.criterion(), margin)
-                    : Readable.percent(margin);
+                    : ShownValue.percent(margin);
         }
 
         String cell(int column) {

@@ -44,7 +44,7 @@ final class TextColumns {
         int room = PAGE - indent;
         List<String> lines = new ArrayList<>();
         StringBuilder line = new StringBuilder();
-        for (String word : text.split(" ")) {
+        for (String word : text.split(" ", -1)) {
             String rest = word;
             if (line.length() > 0 && width(line.toString()) + 1 + width(rest) > room) {
                 lines.add(" ".repeat(indent) + line);

@@ -9,6 +9,9 @@ import throwbench.solver.chamber.ChamberState;
 import throwbench.solver.chamber.Clearance;
 import throwbench.solver.chamber.IdealValves;
 import throwbench.solver.chamber.Side;
+import throwbench.solver.document.MachineDocument;
+import throwbench.solver.document.attached.AttachedFiles;
+import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.finding.Judgement;
 import throwbench.solver.fluid.PerfectGas;
@@ -114,6 +117,11 @@ public final class ShownMachines {
                 like.bookmarks());
     }
 
+    /** These machines are made from records: no file describes them, and no view reads one. */
+    private static final MachineDocument NO_FILE = MachineDocument.read("{}", AttachedFiles.NONE, GasNames.ANY)
+            .document()
+            .orElseThrow();
+
     /** The state of the bench for a duty point of a machine's first throw, SI. */
     public static Shown shown(Machine machine, int dutyIndex) {
         return shown(machine, dutyIndex, UnitSystem.SI);
@@ -125,12 +133,14 @@ public final class ShownMachines {
                         machine, machine.dutyPoints().get(dutyIndex))
                 .get();
         return new Shown(
+                NO_FILE,
                 machine,
                 dutyIndex,
                 0,
                 Summary.of(running, 0, Optional.empty()),
                 Judgement.of(machine, machine.dutyPoints()).findings(),
-                units);
+                units,
+                0);
     }
 
     private static Machine machine(String name, List<String> chambers, double offset, List<DutyPoint> duties) {

@@ -11,6 +11,7 @@ import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import throwbench.app.Samples;
 import throwbench.app.Release;
 
 class CommandLineTest {
@@ -244,8 +245,10 @@ class CommandLineTest {
         ByteArrayOutputStream out = new ByteArrayOutputStream();
         CommandLine commandLine = new CommandLine(new Terminal(out, new ByteArrayOutputStream()));
 
+        Path sample = Files.writeString(folder.resolve("sample.json"), Samples.text(Samples.DEFAULT));
+
         assertEquals(ExitCode.DONE, commandLine.showInstead("there is no display", List.of()));
-        assertEquals(Run.of("check", Run.machine(folder).toString()).out(), out.toString(StandardCharsets.UTF_8));
+        assertEquals(Run.of("check", sample.toString()).out(), out.toString(StandardCharsets.UTF_8));
     }
 
     @Test

@@ -72,8 +72,8 @@ class FindingsTextTest {
         }
         assertTrue(lines.stream().anyMatch(line -> line.startsWith("            not met at 10 of 200 duty points: ")));
         assertTrue(lines.stream().anyMatch(line -> line.endsWith("and 5 more")), String.join("\n", lines));
-        assertTrue(lines.get(lines.size() - 3)
-                .startsWith("327 of 1200 judged findings are not met; worst: reversal, span of throw"));
+        assertTrue(lines.stream()
+                .anyMatch(line -> line.startsWith("327 of 1200 judged findings are not met; worst: reversal, span")));
     }
 
     @Test
@@ -177,10 +177,10 @@ class FindingsTextTest {
                 "needs a suctionTemperature");
         String text = text("m", duties(1, "d"), List.of(unknown));
 
-        assertTrue(
-                text.contains("not judged  temperature  chamber A head  -  at most  150 degC\n"
-                        + "            needs a suctionTemperature\n"),
-                text);
+        assertTrue(text.contains("""
+                not judged  temperature  chamber A head  -  at most  150 degC
+                            needs a suctionTemperature
+                """), text);
     }
 
     @Test

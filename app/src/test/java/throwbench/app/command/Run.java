@@ -2,12 +2,13 @@ package throwbench.app.command;
 
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
+import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Objects;
 import java.util.function.UnaryOperator;
-import throwbench.app.Samples;
 
 /** A command line that was run in this process, with all that it wrote. */
 record Run(ExitCode code, String out, String err) {
@@ -21,11 +22,18 @@ record Run(ExitCode code, String out, String err) {
 
     /** Writes the sample machine into a folder, one piece of its text replaced. */
     static Path machine(Path folder, String replaced, String by) throws IOException {
-        String text = Samples.text(Samples.DEFAULT);
+        String text = oneThrow();
         if (!text.contains(replaced)) {
             throw new IllegalArgumentException("the sample does not hold " + replaced);
         }
         return Files.writeString(folder.resolve("machine.json"), text.replace(replaced, by));
+    }
+
+    /** A machine of one throw and two duty points. */
+    private static String oneThrow() throws IOException {
+        try (InputStream in = Run.class.getResourceAsStream("one-throw.json")) {
+            return new String(Objects.requireNonNull(in).readAllBytes(), StandardCharsets.UTF_8);
+        }
     }
 
     /** Changes the text of a machine file. */

@@ -9,6 +9,8 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -88,9 +90,9 @@ class SolveJsonTest {
                 .lines()
                 .toList();
 
-        assertEquals(List.of(lines.get(0).split(",")), keys(columns));
+        assertEquals(List.of(lines.get(0).split(",", -1)), keys(columns));
         for (int i = 0; i < 24; i++) {
-            String[] cells = lines.get(i + 1).split(",");
+            String[] cells = lines.get(i + 1).split(",", -1);
             int c = 0;
             for (JsonNode column : columns) {
                 assertEquals(24, column.size());
@@ -124,13 +126,13 @@ class SolveJsonTest {
         assertEquals(
                 expected.speedFluctuation(), summary.get("speedFluctuation").doubleValue(), 0);
         double power = summary.get("indicatedPower_W").get("first").doubleValue();
-        assertEquals(expected.throwFlow().indicatedPower().get("first"), power, 0);
+        assertEquals(first(expected.throwFlow().indicatedPower()), power, 0);
         assertEquals(
-                expected.throwFlow().capacity().get("first").orElseThrow(),
+                first(expected.throwFlow().capacity()).orElseThrow(),
                 summary.get("capacity_kg_s").get("first").doubleValue(),
                 0);
         assertEquals(
-                expected.throwFlow().inletVolume().get("first"),
+                first(expected.throwFlow().inletVolume()),
                 summary.get("inletVolume_m3_s").get("first").doubleValue(),
                 0);
         assertEquals(
@@ -154,6 +156,10 @@ class SolveJsonTest {
         assertExtremes(expected.pressures().get(0), Column.TRAVEL, extremes.get("pressure_Pa[A head]"));
         assertExtremes(expected.pressures().get(1), Column.TRAVEL, extremes.get("pressure_Pa[A crank]"));
         assertEquals(359.5, extremes.get("crank_angle_deg").get("max").doubleValue(), 0);
+    }
+
+    private static <T> T first(Map<String, T> byStage) {
+        return Objects.requireNonNull(byStage.get("first"));
     }
 
     private static void assertExtremes(Extremes expected, Column column, JsonNode written) {

@@ -17,6 +17,7 @@ import throwbench.solver.document.json.Parsed;
 import throwbench.solver.document.json.TextEdit;
 import throwbench.solver.document.quantity.Dimension;
 import throwbench.solver.document.quantity.Quantity;
+import throwbench.solver.document.quantity.QuantityReading;
 import throwbench.solver.document.quantity.QuantityText;
 import throwbench.solver.document.schema.Key;
 import throwbench.solver.document.schema.Kind;
@@ -99,6 +100,30 @@ public final class MachineDocument {
         return node == null || node.isNest() ? Optional.empty() : Optional.of(node.text());
     }
 
+    /** The quantity at a place: as written, else the default; empty where there is none, or none that can be read. */
+    public Optional<Quantity> quantity(KeyPath path) {
+        Key key = PathReader.key(path, root);
+        if (key == null || (key.kind() != Kind.QUANTITY && key.kind() != Kind.CLEARANCE)) {
+            return Optional.empty();
+        }
+        String written = valueText(path).orElse(key.defaultValue().isPresent() ? key.otherwise() : "");
+        Dimension dimension = key.dimension().orElseGet(() -> clearanceDimension(path));
+        QuantityReading reading = QuantityText.read(written, dimension, ambientPressure());
+        return reading instanceof Quantity quantity ? Optional.of(quantity) : Optional.empty();
+    }
+
+    /**
+     * Reads what a user typed for a place, with a decimal comma, a sum, or a unit as the SI writes it; what is there now
+     * lends its unit to a number alone.
+     *
+     * @return the text for {@link #with}, or a sentence
+     * @throws IllegalArgumentException when the page has no such key
+     */
+    public TypedInput typed(KeyPath path, String typed) {
+        Key key = key(path).orElseThrow(() -> new IllegalArgumentException("no key " + path));
+        return TypedInput.read(typed, key, quantity(path), ambientPressure());
+    }
+
     /** Whether something stands at a place. */
     public boolean has(KeyPath path) {
         return PathReader.node(path, root) != null;
@@ -157,7 +182,7 @@ public final class MachineDocument {
      *
      * @param value as {@link #valueText} would give it: 75 mm, 14 %, 1.29, true, head
      * @throws IllegalArgumentException when the place leads through a value that is no object or list, or beyond the end of
-     *     a list
+     *     a list, or when the text is longer than a file may hold
      */
     public MachineDocument with(KeyPath path, String value) {
         Node node = PathReader.node(path, root);

@@ -67,10 +67,10 @@ final class PathReader {
         return null;
     }
 
-    /** The path that a text spells; what neither file nor page knows is split at dots and brackets. */
+    /** The path that a text spells; what the page does not know follows the file, then dots and brackets. */
     static KeyPath read(String spelled, Node root) {
         KeyPath path = read(spelled, Schema.root(), root, KeyPath.ROOT);
-        return path != null ? path : plain(spelled);
+        return path != null ? path : follow(spelled, root, KeyPath.ROOT);
     }
 
     private static @Nullable KeyPath read(String rest, Key key, @Nullable Node node, KeyPath above) {
@@ -138,12 +138,37 @@ final class PathReader {
                 return path;
             }
         }
-        return above.key(rest);
+        return hasPrefix(node, rest) ? null : above.key(rest);
     }
 
-    private static KeyPath plain(String spelled) {
-        KeyPath path = KeyPath.ROOT;
-        for (String part : spelled.split("\\.", -1)) {
+    /** Whether the text goes on behind the name of a member that is there. */
+    private static boolean hasPrefix(@Nullable Node node, String rest) {
+        for (int end = rest.indexOf('.'); node != null && end > 0; end = rest.indexOf('.', end + 1)) {
+            if (node.member(rest.substring(0, end)) != null) {
+                return true;
+            }
+        }
+        return false;
+    }
+
+    private static KeyPath follow(String rest, Node node, KeyPath above) {
+        String spelled = afterDot(rest);
+        for (int end = spelled.length(); end > 0; end--) {
+            boolean ends = end == spelled.length() || spelled.charAt(end) == '.' || spelled.charAt(end) == '[';
+            Node member = ends ? node.member(spelled.substring(0, end)) : null;
+            if (member != null) {
+                return follow(spelled.substring(end), member, above.key(spelled.substring(0, end)));
+            }
+        }
+        int close = spelled.indexOf(']');
+        int index = spelled.startsWith("[") && close > 0 ? index(spelled.substring(1, close)) : -1;
+        Node item = index < 0 ? null : step(node, KeyPath.ROOT.item(index).last());
+        return item != null ? follow(spelled.substring(close + 1), item, above.item(index)) : plain(spelled, above);
+    }
+
+    private static KeyPath plain(String spelled, KeyPath above) {
+        KeyPath path = above;
+        for (String part : spelled.isEmpty() ? new String[0] : spelled.split("\\.", -1)) {
             int open = part.indexOf('[');
             path = open == 0 ? path : path.key(open < 0 ? part : part.substring(0, open));
             while (open >= 0 && part.indexOf(']', open) > 0) {

@@ -129,7 +129,7 @@ public final class Checker {
             missing(child, above, path + '.' + child.name());
         }
         if (deeper.isEmpty()) {
-            flaws.add(new Flaw(above.start(), path, FlawList.MISSING, Said.wanted(key)));
+            flaws.add(new Flaw(above.start(), path, FlawList.MISSING, key.wanted()));
         }
     }
 
@@ -190,7 +190,7 @@ public final class Checker {
             if (member.isRepeated()) {
                 continue;
             }
-            if (member.name().isBlank()) {
+            if (member.name().isBlank() && key.declares().isPresent()) {
                 flaws.add(member, "a name of nothing", "a name");
             }
             key.declares().ifPresent(space -> checked.declare(space, member.name(), member));
@@ -237,7 +237,7 @@ public final class Checker {
     }
 
     private void wrong(Key key, Node node) {
-        flaws.add(node, Said.node(node), Said.wanted(key));
+        flaws.add(node, Said.node(node), key.wanted());
     }
 
     private void resolve(Reference reference) {

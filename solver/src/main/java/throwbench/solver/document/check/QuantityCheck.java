@@ -21,19 +21,19 @@ final class QuantityCheck {
             return;
         }
         if (!text && !number) {
-            checked.flaws().add(node, Said.node(node), Said.wanted(key));
+            checked.flaws().add(node, Said.node(node), key.wanted());
             return;
         }
         Dimension dimension = dimension(key, node);
         if (number && !dimension.isDimensionless()) {
-            checked.flaws().add(node, node.text() + " without a unit", Said.wanted(key));
+            checked.flaws().add(node, node.text() + " without a unit", key.wanted());
             return;
         }
         QuantityReading reading = QuantityText.read(node.text(), dimension, checked.ambientPressure());
         if (reading instanceof Quantity quantity) {
             take(key, node, quantity, checked);
         } else if (reading instanceof Refusal refusal) {
-            String wanted = key.kind() == Kind.CLEARANCE ? Said.wanted(key) : refusal.wanted();
+            String wanted = key.kind() == Kind.CLEARANCE ? key.wanted() : refusal.wanted();
             checked.flaws().add(node, refusal.found(), wanted);
         }
     }
@@ -42,7 +42,7 @@ final class QuantityCheck {
         if (key.range().contains(quantity.value())) {
             checked.measure(node, quantity);
         } else {
-            checked.flaws().add(node, Said.node(node), Said.wanted(key));
+            checked.flaws().add(node, Said.node(node), key.wanted());
         }
     }
 

@@ -6,7 +6,6 @@ import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.core.JsonToken;
 import com.fasterxml.jackson.core.StreamReadConstraints;
-import com.fasterxml.jackson.core.exc.StreamConstraintsException;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.util.ArrayList;
@@ -24,12 +23,12 @@ public final class JsonText {
     /** Deepest nesting of objects and lists; the page needs seven. */
     public static final int DEEPEST = 32;
 
-    private static final int LONGEST_TEXT = 200_000;
-    private static final int LONGEST_NUMBER = 100;
-    private static final int LONGEST_NAME = 1_000;
+    static final int LONGEST_TEXT = 200_000;
+    static final int LONGEST_NUMBER = 100;
+    static final int LONGEST_NAME = 1_000;
 
-    private static final String LIMITS = "at most " + DEEPEST + " levels of objects and lists, " + LONGEST_TEXT
-            + " characters of a text, " + LONGEST_NUMBER + " of a number";
+    private static final String BEHIND = "something behind the object";
+    private static final String THE_END = "the end of the text";
 
     private static final JsonFactory FACTORY = new JsonFactoryBuilder()
             .disable(JsonFactory.Feature.INTERN_FIELD_NAMES)
@@ -75,12 +74,18 @@ public final class JsonText {
         try (JsonParser parser = FACTORY.createParser(characters)) {
             follow(parser);
         } catch (JsonProcessingException broken) {
-            root = null;
-            flaws.clear();
-            flaws.add(flaw(broken));
+            boolean complete = root != null && open == null;
+            Flaw flaw = Complaint.flaw(text, broken);
+            refuse(complete ? at(flaw.offset(), BEHIND, THE_END) : flaw);
         } catch (IOException impossible) {
             throw new UncheckedIOException("reading characters in memory", impossible);
         }
+    }
+
+    private void refuse(Flaw flaw) {
+        root = null;
+        flaws.clear();
+        flaws.add(flaw);
     }
 
     private void follow(JsonParser parser) throws IOException {
@@ -97,9 +102,7 @@ public final class JsonText {
         int keyStart = offset(parser);
         for (JsonToken token = first; token != null; token = parser.nextToken()) {
             if (root != null && open == null) {
-                root = null;
-                flaws.clear();
-                flaws.add(at(offset(parser), "something behind the object", "the end of the text"));
+                refuse(at(offset(parser), BEHIND, THE_END));
                 return;
             }
             if (token == JsonToken.FIELD_NAME) {
@@ -188,15 +191,5 @@ public final class JsonText {
 
     private Flaw at(int offset, String found, String wanted) {
         return new Flaw(offset, Flaw.place(text, offset), found, wanted);
-    }
-
-    private Flaw flaw(JsonProcessingException broken) {
-        boolean placed = broken.getLocation() != null && broken.getLocation().getCharOffset() >= 0;
-        int offset = placed ? (int) Math.min(broken.getLocation().getCharOffset(), text.length()) : text.length();
-        String message = broken.getOriginalMessage();
-        if (broken instanceof StreamConstraintsException) {
-            return at(offset, "more than is read here (" + message + ")", LIMITS);
-        }
-        return at(offset, "no JSON (" + message + ")", "JSON");
     }
 }

@@ -208,6 +208,16 @@ public final class Key {
         return required;
     }
 
+    /** What may stand here, for sentences: {@code a length, as "75 mm", above 0}. */
+    public String wanted() {
+        String allowed = range.said().isEmpty() ? "" : ", " + range.said();
+        if (dimension != null) {
+            String others = words.isEmpty() ? "" : ", or " + String.join(", ", words);
+            return dimension.wanted() + allowed + others;
+        }
+        return words.isEmpty() ? kind.said() + allowed : "one of " + String.join(", ", words);
+    }
+
     /** The text that a missing value stands for, or words where it depends on other keys; may be empty. */
     public String otherwise() {
         return otherwise;

@@ -5,7 +5,7 @@ import java.math.MathContext;
 import java.math.RoundingMode;
 
 /** Results as people read them: four significant digits, in a unit of fitting size. */
-record Readable(String number, String unit) {
+record ShownValue(String number, String unit) {
 
     private static final MathContext FOUR_DIGITS = new MathContext(4, RoundingMode.HALF_EVEN);
     private static final double KILO = 1e3;
@@ -18,19 +18,19 @@ record Readable(String number, String unit) {
      * @param unit its unit as results have it: SI, deg or 1
      * @param size a value of the greatest size to be read beside it, which decides between N and kN
      */
-    static Readable of(double value, String unit, double size) {
+    static ShownValue of(double value, String unit, double size) {
         return switch (unit) {
             case "N", "N m", "W" ->
                 Math.abs(size) >= KILO
-                        ? new Readable(digits(value / KILO), "k" + unit)
-                        : new Readable(digits(value), unit);
+                        ? new ShownValue(digits(value / KILO), "k" + unit)
+                        : new ShownValue(digits(value), unit);
             case "Pa" ->
                 Math.abs(size) >= MEGA
-                        ? new Readable(digits(value / MEGA), "MPa")
-                        : new Readable(digits(value / KILO), "kPa");
-            case "K" -> new Readable(digits(value - CELSIUS_ZERO), "degC");
-            case "1" -> new Readable(digits(value), "");
-            default -> new Readable(digits(value), unit);
+                        ? new ShownValue(digits(value / MEGA), "MPa")
+                        : new ShownValue(digits(value / KILO), "kPa");
+            case "K" -> new ShownValue(digits(value - CELSIUS_ZERO), "degC");
+            case "1" -> new ShownValue(digits(value), "");
+            default -> new ShownValue(digits(value), unit);
         };
     }
 

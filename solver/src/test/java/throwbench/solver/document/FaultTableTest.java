@@ -1,0 +1,116 @@
+package throwbench.solver.document;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.DynamicTest;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.TestFactory;
+
+/** Every kind of fault, each made by an edit of a file without any, with its very words. */
+class FaultTableTest {
+
+    private static MachineDocument edited(String edits) {
+        MachineDocument document = Samples.document(Samples.everyKey());
+        for (String edit : edits.split(" ; ", -1)) {
+            if (edit.startsWith("- ")) {
+                document = document.without(document.path(edit.substring(2).strip()));
+            } else {
+                int sign = edit.indexOf(" = ");
+                KeyPath path = document.path(edit.substring(0, sign).strip());
+                document = document.withJson(path, edit.substring(sign + 3).strip());
+            }
+        }
+        return document;
+    }
+
+    @TestFactory
+    Stream<DynamicTest> saysWhatIsWrongAndNothingElse() {
+        List<DynamicTest> tests = new ArrayList<>();
+        for (String row : Samples.rows("faults.txt")) {
+            String[] cells = row.split(" \\| ", -1);
+            assertEquals(4, cells.length, row);
+            Fault expected = new Fault(cells[1], cells[2].strip(), cells[3].strip());
+            tests.add(DynamicTest.dynamicTest(
+                    cells[0],
+                    () -> assertEquals(
+                            List.of(expected), Samples.read(edited(cells[0])).faults())));
+        }
+        return tests.stream();
+    }
+
+    @Test
+    void fileBeforeAnyEditHasNoFault() {
+        assertEquals(List.of(), Samples.read(Samples.everyKey()).faults());
+    }
+
+    @Test
+    void allFaultsAreReportedTogetherInTheOrderOfTheFile() {
+        MachineDocument document =
+                edited("site.gravity = 1 ; drive.speed = \"1 kg\" ; fluids.sour gas.mixture.methane = 0.7"
+                        + " ; throws[0].rodLength = \"10 mm\" ; throws[1].name = \"A\" ; - dutyPoints[0].stages.lift"
+                        + " ; bookmarks[0].throw = \"C\" ; colour = \"red\"");
+        List<String> paths =
+                Samples.read(document).faults().stream().map(Fault::path).toList();
+        assertEquals(
+                List.of(
+                        "site.gravity",
+                        "drive.speed",
+                        "fluids.sour gas.mixture",
+                        "throws[0].rodLength",
+                        "throws[0].connectingRod.massCentreFromCrankPin",
+                        "throws[1].name",
+                        "dutyPoints[0].stages.lift",
+                        "bookmarks[0].throw",
+                        "colour"),
+                paths);
+    }
+
+    @Test
+    void repeatedKeyIsAFaultAtItsPathAndTheFirstOneCounts() {
+        String text = Samples.pageExample()
+                .replace("\"crankRadius\": \"75 mm\"", "\"crankRadius\": \"75 mm\", \"crankRadius\": 5");
+        assertEquals(
+                List.of(new Fault("throws[0].crankRadius", "the key a second time", "each key once in an object")),
+                Samples.read(text).faults());
+    }
+
+    @Test
+    void emptyObjectMissesAllThatIsRequired() {
+        List<String> lines =
+                Samples.read("{}").faults().stream().map(Fault::line).toList();
+        assertEquals(
+                List.of(
+                        "throwbench: missing, wanted 1, the version of this form of file",
+                        "name: missing, wanted a name",
+                        "drive.speed: missing, wanted a speed of rotation, as \"740 rpm\", above 0",
+                        "fluids: missing, wanted an object { … } by name",
+                        "stages: missing, wanted an object { … } by name",
+                        "throws: missing, wanted a list [ … ]",
+                        "dutyPoints: missing, wanted a list [ … ]"),
+                lines);
+    }
+
+    @Test
+    void controlCharactersOfAFileStayInTheLine() {
+        String line = Samples.read("{\"a\\n\\u001b[2J\": 1}").faults().stream()
+                .map(Fault::line)
+                .filter(said -> said.contains("unknown key"))
+                .findFirst()
+                .orElseThrow();
+        assertTrue(line.startsWith("a\\u000a\\u001b[2J: an unknown key, wanted one of throwbench, "), line);
+    }
+
+    @Test
+    void longTextIsCutInTheMessage() {
+        String name = "\"" + "x".repeat(100_000) + "\"";
+        Fault fault = Samples.read("{\"drive\": {\"speed\": " + name + "}}").faults().stream()
+                .filter(f -> f.path().equals("drive.speed"))
+                .findFirst()
+                .orElseThrow();
+        assertTrue(fault.line().length() < 200, fault.line());
+    }
+}
