@@ -11,8 +11,8 @@ import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import throwbench.app.Samples;
 import throwbench.app.Release;
+import throwbench.app.Samples;
 
 class CommandLineTest {
 
