@@ -118,7 +118,8 @@ final class Machines {
         RunningMachine settled =
                 RunningMachine.settle(solved, solved.dutyPoints().get(0)).get();
         RunningMachine running =
-                new RunningMachine(machine, machine.dutyPoints().get(0), settled.throwsInOrder());
+                new RunningMachine(
+                        machine, machine.dutyPoints().get(0), settled.throwsInOrder(), settled.speedCurve());
         Summary summary = Summary.of(running, throwIndex, Optional.empty());
         // these machines come from no file; the view reads nothing of it
         MachineDocument none = MachineDocument.read("{}", AttachedFiles.NONE, GasNames.TABLE)
