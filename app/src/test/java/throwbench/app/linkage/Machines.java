@@ -10,7 +10,6 @@ import throwbench.solver.chamber.IdealValves;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.attached.AttachedFiles;
-import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.fluid.Fluid;
 import throwbench.solver.fluid.PerfectGas;
@@ -115,7 +114,7 @@ final class Machines {
                 RunningMachine.settle(machine, machine.dutyPoints().get(0)).get();
         Summary summary = Summary.of(running, throwIndex, Optional.empty());
         // these machines come from no file; the view reads nothing of it
-        MachineDocument none = MachineDocument.read("{}", AttachedFiles.NONE, GasNames.TABLE)
+        MachineDocument none = MachineDocument.read("{}", AttachedFiles.NONE)
                 .document()
                 .orElseThrow();
         return new Shown(none, machine, 0, throwIndex, summary, List.of(), UnitSystem.SI, 0);
