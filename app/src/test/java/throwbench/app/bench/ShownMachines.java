@@ -134,9 +134,8 @@ public final class ShownMachines {
     }
 
     /** These machines are made from records: no file describes them, and no view reads one. */
-    private static final MachineDocument NO_FILE = MachineDocument.read("{}", AttachedFiles.NONE)
-            .document()
-            .orElseThrow();
+    private static final MachineDocument NO_FILE =
+            MachineDocument.read("{}", AttachedFiles.NONE).document().orElseThrow();
 
     /** The state of the bench for a duty point of a machine's first throw, SI. */
     public static Shown shown(Machine machine, int dutyIndex) {
