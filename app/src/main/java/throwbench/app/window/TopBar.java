@@ -54,7 +54,7 @@ final class TopBar extends HBox {
                         name,
                         edited,
                         choice(duty, "duty", "duty point (Page Up, Page Down)", 230, bench::chooseDuty),
-                        choice(shownThrow, "throw", "throw shown in full", 100, bench::chooseThrow),
+                        choice(shownThrow, "throw", "throw shown in full", 124, bench::chooseThrow),
                         choice(units, "units", "units in which values are shown", 90, this::chooseUnits),
                         left,
                         play(),
