@@ -174,6 +174,7 @@ public final class StripView extends Region implements View {
         size(values, LegendPainter.VALUE + 4, getHeight());
         size(cursor, 2 * CursorPainter.REACH, getHeight());
         values.setLayoutX(known.layout().left() - LegendPainter.VALUE - 10);
+        stillPen.clear(still.getWidth(), still.getHeight());
         painter.paint(stillPen, known, palette);
         requestLayout();
     }
