@@ -69,7 +69,7 @@ final class ThrowSettler {
     }
 
     private Optional<PressureCurve> solve(int chamberIndex, Chamber chamber, ChamberVolume volume) {
-        String path = "throws[" + index + "].chambers[" + chamberIndex + "].cycle.kind";
+        String path = "throws[" + index + "].chambers[" + chamberIndex + "].cycle";
         ChamberCondition condition = duty.condition(chamber.name());
         Optional<CycleOutcome> alone = chamber.cycle().solveAlone(condition);
         if (alone.isPresent()) {
