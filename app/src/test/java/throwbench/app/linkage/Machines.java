@@ -117,13 +117,11 @@ final class Machines {
         RunningMachine settled =
                 RunningMachine.settle(solved, solved.dutyPoints().get(0)).get();
         RunningMachine running =
-                new RunningMachine(
-                        machine, machine.dutyPoints().get(0), settled.throwsInOrder(), settled.speedCurve());
+                new RunningMachine(machine, machine.dutyPoints().get(0), settled.throwsInOrder(), settled.speedCurve());
         Summary summary = Summary.of(running, throwIndex, Optional.empty());
         // these machines come from no file; the view reads nothing of it
-        MachineDocument none = MachineDocument.read("{}", AttachedFiles.NONE)
-                .document()
-                .orElseThrow();
+        MachineDocument none =
+                MachineDocument.read("{}", AttachedFiles.NONE).document().orElseThrow();
         return new Shown(none, machine, 0, throwIndex, summary, List.of(), UnitSystem.SI, 0);
     }
 
