@@ -18,6 +18,7 @@ import throwbench.solver.load.ConnectingRod;
 import throwbench.solver.load.Crank;
 import throwbench.solver.load.Friction;
 import throwbench.solver.load.ReciprocatingMasses;
+import throwbench.solver.machine.Bookmark;
 import throwbench.solver.machine.Chamber;
 import throwbench.solver.machine.Drive;
 import throwbench.solver.machine.Driver;
@@ -97,6 +98,23 @@ public final class ShownMachines {
                 like.loadSteps(),
                 like.ranges(),
                 like.bookmarks());
+    }
+
+    /** A machine with bookmarks. */
+    public static Machine withBookmarks(Machine like, List<Bookmark> bookmarks) {
+        return new Machine(
+                like.name(),
+                like.notes(),
+                like.site(),
+                like.drive(),
+                like.fluids(),
+                like.stages(),
+                like.throwsInOrder(),
+                like.dutyPoints(),
+                like.limits(),
+                like.loadSteps(),
+                like.ranges(),
+                bookmarks);
     }
 
     /** A machine with other limits. */
