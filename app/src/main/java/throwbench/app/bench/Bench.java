@@ -12,7 +12,6 @@ import throwbench.solver.document.Fault;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.MachineFile;
 import throwbench.solver.document.Reading;
-import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.finding.Finding;
 import throwbench.solver.machine.Machine;
@@ -111,7 +110,7 @@ public final class Bench {
     }
 
     private List<Fault> take(MachineDocument next) {
-        Reading reading = next.read(file.get().attached(), GasNames.TABLE);
+        Reading reading = next.read(file.get().attached());
         if (reading.machine().isEmpty()) {
             return reading.faults();
         }

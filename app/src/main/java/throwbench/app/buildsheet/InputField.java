@@ -71,7 +71,9 @@ final class InputField extends VBox {
             double sense = event.getCode() == KeyCode.UP ? 1 : -1;
             step(event.isShiftDown() ? 10 * sense : sense);
             event.consume();
-        } else if (event.isShortcutDown() && event.getCode() == KeyCode.Z && field.getText().equals(lastShown)) {
+        } else if (event.isShortcutDown()
+                && event.getCode() == KeyCode.Z
+                && field.getText().equals(lastShown)) {
             // nothing typed that the field's own undo could take back: the machine's is meant
             input.undo(event.isShiftDown());
             event.consume();

@@ -59,7 +59,9 @@ final class Headline {
         numberWidth = pen.width(readout.number(peak));
         degreeWidth = pen.width("°");
         double right = wordsLeft + compressionWidth + numberWidth + 2 * gap + pen.width(unit);
-        box = new Box(left, 10 * scene.weight(), right - left, 1.5 * size);
+        // on whole points: the headline is a layer of its own, and letters between points blur
+        box = new Box(
+                Math.floor(left), Math.floor(10 * scene.weight()), Math.ceil(right - left) + 1, Math.ceil(1.5 * size));
     }
 
     private static double total(Pen pen, double size, Readout readout) {

@@ -67,7 +67,8 @@ final class LinkageHands {
     private void press(MouseEvent e) {
         view.requestFocus();
         Optional<LinkagePicture> picture = view.picture();
-        if (picture.isEmpty() || e.getButton() != MouseButton.PRIMARY && e.getButton() != MouseButton.MIDDLE) {
+        boolean held = e.getButton() == MouseButton.PRIMARY || e.getButton() == MouseButton.MIDDLE;
+        if (picture.isEmpty() || !held) {
             return;
         }
         MovingPainter painted = picture.get().moving();

@@ -47,6 +47,7 @@ public final class LinkageView extends Region implements View {
     private @Nullable Shown shown;
     private @Nullable LinkagePicture picture;
     private Optional<Framing> ownFraming = Optional.empty();
+    private Optional<Shown> held = Optional.empty();
     private boolean stale = true;
     private double drawnAngle = Double.NaN;
     private String spoken = "";
@@ -114,6 +115,13 @@ public final class LinkageView extends Region implements View {
     /** Shows the whole machine again after zooming and panning. */
     public void frameAll() {
         ownFraming = Optional.empty();
+        picture = null;
+        spoil();
+    }
+
+    /** Draws a held design as a ghost under the present one, or none. */
+    public void hold(Optional<Shown> design) {
+        held = design;
         spoil();
     }
 
@@ -161,7 +169,14 @@ public final class LinkageView extends Region implements View {
 
     private LinkagePicture settle(Shown state, double width, double height) {
         LinkageChoice choice = new LinkageChoice(kinds.get(), arrowFactor.get(), alone.get(), typeScale.get(), true);
-        LinkagePicture next = new LinkagePicture(state, palette, choice, width, height, stillPen, ownFraming);
+        LinkagePicture next = new LinkagePicture(
+                state,
+                palette,
+                choice,
+                PictureSize.of(width, height, choice.typeScale()),
+                stillPen,
+                new LinkagePicture.Standing(
+                        ownFraming, Optional.ofNullable(picture).filter(p -> follows(p, state)), held));
         picture = next;
         place(stillCanvas, new Box(0, 0, width, height));
         clear(stillCanvas);
@@ -170,6 +185,13 @@ public final class LinkageView extends Region implements View {
         place(headlineCanvas, next.headlineBox());
         stale = false;
         return next;
+    }
+
+    /** Whether a state is another one of the same throw, whose drawing had better not jump. */
+    private static boolean follows(LinkagePicture before, Shown state) {
+        return before.shown().throwIndex() == state.throwIndex()
+                && before.shown().machine().throwsInOrder().size()
+                        == state.machine().throwsInOrder().size();
     }
 
     /** Puts a layer where its part of the picture is; its pen keeps counting from the view's corner. */

@@ -125,8 +125,9 @@ final class Pointing {
         if (!slider.trunk() && along > -slider.back() && along < slider.front() && across < slider.halfHeight()) {
             return target(Part.CROSSHEAD, Column.VELOCITY);
         }
-        for (RodLine.Piston p : own.line().pistons()) {
-            double back = slider.trunk() && p == own.line().pistons().get(0) ? -slider.back() : p.crankFace();
+        for (int i = 0; i < own.line().pistons().size(); i++) {
+            RodLine.Piston p = own.line().pistons().get(i);
+            double back = slider.trunk() && i == 0 ? -slider.back() : p.crankFace();
             if (along > back && along < p.headFace() && across < p.radius()) {
                 return target(
                         p.plunger() ? Part.PISTON_ROD : Part.PISTON, p.plunger() ? Column.ROD_LOAD : Column.TRAVEL);

@@ -9,6 +9,7 @@ import javafx.scene.AccessibleRole;
 import javafx.scene.Cursor;
 import javafx.scene.canvas.Canvas;
 import javafx.scene.control.Label;
+import javafx.scene.control.TextInputControl;
 import javafx.scene.input.KeyEvent;
 import javafx.scene.input.MouseEvent;
 import javafx.scene.layout.Region;
@@ -97,7 +98,7 @@ public final class StripView extends Region implements View {
         setOnMouseReleased(e -> scrubbing = false);
         setOnMouseMoved(this::hover);
         setOnMouseExited(e -> hint.setVisible(false));
-        setOnKeyPressed(this::key);
+        setOnKeyPressed(this::scrub);
         wear(palette);
     }
 
@@ -279,9 +280,13 @@ public final class StripView extends Region implements View {
         }
     }
 
-    private void key(KeyEvent event) {
+    /**
+     * Turns the crank by a key, wherever in the window it was pressed; a key that belongs to a text or turns nothing is left
+     * alone.
+     */
+    public void scrub(KeyEvent event) {
         StripPlot drawn = plot;
-        if (event.getTarget() != this || event.isAltDown() || drawn == null) {
+        if (event.getTarget() instanceof TextInputControl || event.isAltDown() || drawn == null) {
             return;
         }
         RunningThrow running =

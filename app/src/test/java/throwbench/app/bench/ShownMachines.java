@@ -11,7 +11,6 @@ import throwbench.solver.chamber.IdealValves;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.attached.AttachedFiles;
-import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.finding.Judgement;
 import throwbench.solver.fluid.PerfectGas;
@@ -135,7 +134,7 @@ public final class ShownMachines {
     }
 
     /** These machines are made from records: no file describes them, and no view reads one. */
-    private static final MachineDocument NO_FILE = MachineDocument.read("{}", AttachedFiles.NONE, GasNames.ANY)
+    private static final MachineDocument NO_FILE = MachineDocument.read("{}", AttachedFiles.NONE)
             .document()
             .orElseThrow();
 

@@ -136,7 +136,14 @@ class FindingsPanelTest {
     @Test
     void nothingJudgedIsSaidInWords(FxRobot robot) {
         Shown none = new Shown(
-                shown.machine(), shown.dutyIndex(), shown.throwIndex(), shown.summary(), List.of(), shown.units());
+                shown.document(),
+                shown.machine(),
+                shown.dutyIndex(),
+                shown.throwIndex(),
+                shown.summary(),
+                List.of(),
+                shown.units(),
+                0);
         robot.interact(() -> {
             panel.show(none);
             panel.draw(instant);

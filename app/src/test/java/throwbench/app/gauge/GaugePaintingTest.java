@@ -137,15 +137,9 @@ class GaugePaintingTest {
                     GaugeLayout layout = GaugeLayout.of(width, height, 6);
                     RecordingPen pen = moving(shown, layout, 286.7);
                     new GaugePainter().still(pen, gauges(shown), layout, Palette.LIGHT);
-                    for (RecordingPen.Written a : pen.texts) {
-                        assertTrue(a.left() >= 0 && a.right() <= width, a::toString);
-                        for (RecordingPen.Written b : pen.texts) {
-                            boolean apart = a == b
-                                    || Math.abs(a.y() - b.y()) > 0.72 * Math.min(a.size(), b.size())
-                                    || a.right() <= b.left()
-                                    || b.right() <= a.left();
-                            assertTrue(apart, () -> a + " touches " + b);
-                        }
+                    assertEquals(List.of(), pen.touching(), width + " x " + height);
+                    for (RecordingPen.Written text : pen.texts) {
+                        assertTrue(text.left() >= 0 && text.right() <= width, text::toString);
                     }
                 }
             }

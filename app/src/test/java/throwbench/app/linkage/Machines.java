@@ -10,9 +10,9 @@ import throwbench.solver.chamber.IdealValves;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.attached.AttachedFiles;
-import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.fluid.Fluid;
+import throwbench.solver.fluid.Liquid;
 import throwbench.solver.fluid.PerfectGas;
 import throwbench.solver.load.ConnectingRod;
 import throwbench.solver.load.Crank;
@@ -102,7 +102,8 @@ final class Machines {
         return machine(
                 "triplex",
                 Rotation.COUNTER_CLOCKWISE,
-                List.of(plunger("1", 0), plunger("2", third), plunger("3", -third)));
+                List.of(plunger("1", 0), plunger("2", third), plunger("3", -third)),
+                new Liquid(1025, 2.2e9, 2300));
     }
 
     /** Every arrangement by name. */
@@ -111,11 +112,16 @@ final class Machines {
     }
 
     static Shown shown(Machine machine, int throwIndex) {
+        // the pressures of a pump are those of a gas here: what is drawn depends on them alone
+        Machine solved = machine(machine.name(), machine.drive().rotation(), machine.throwsInOrder());
+        RunningMachine settled =
+                RunningMachine.settle(solved, solved.dutyPoints().get(0)).get();
         RunningMachine running =
-                RunningMachine.settle(machine, machine.dutyPoints().get(0)).get();
+                new RunningMachine(
+                        machine, machine.dutyPoints().get(0), settled.throwsInOrder(), settled.speedCurve());
         Summary summary = Summary.of(running, throwIndex, Optional.empty());
         // these machines come from no file; the view reads nothing of it
-        MachineDocument none = MachineDocument.read("{}", AttachedFiles.NONE, GasNames.TABLE)
+        MachineDocument none = MachineDocument.read("{}", AttachedFiles.NONE)
                 .document()
                 .orElseThrow();
         return new Shown(none, machine, 0, throwIndex, summary, List.of(), UnitSystem.SI, 0);
@@ -176,8 +182,12 @@ final class Machines {
     }
 
     private static Machine machine(String name, Rotation rotation, List<Throw> throwsInOrder) {
+        return machine(name, rotation, throwsInOrder, new PerfectGas(0.0272, 1.29));
+    }
+
+    private static Machine machine(String name, Rotation rotation, List<Throw> throwsInOrder, Fluid fluid) {
         double ambient = 101325;
-        Map<String, Fluid> fluids = Map.of("fluid", new PerfectGas(0.0272, 1.29));
+        Map<String, Fluid> fluids = Map.of("fluid", fluid);
         StageConditions conditions = new StageConditions(
                 OptionalDouble.of(4.1e5 + ambient), OptionalDouble.of(305.15), OptionalDouble.of(11.5e5 + ambient));
         return new Machine(

@@ -53,7 +53,7 @@ public record MachineHarmonics(
         HarmonicSums sums = new HarmonicSums(orders);
         Instant instant = new Instant(running, 0);
         double[] values = new double[orders.length];
-        TurnQuadrature.over(BreakAngles.ofMachine(running, 0), LONGEST_PIECE, (angle, weight) -> {
+        TurnQuadrature.over(BreakAngles.forMachineIntegrals(running, 0), LONGEST_PIECE, (angle, weight) -> {
             instant.turnTo(angle);
             for (int c = 0; c < columns; c++) {
                 values[c] = instant.at(OF_MACHINE.get(c));
@@ -76,7 +76,7 @@ public record MachineHarmonics(
         Instant instant = new Instant(running, 0);
         double[] value = new double[1];
         double longest = Math.min(LONGEST_PIECE, Angles.TURN / orders);
-        TurnQuadrature.over(BreakAngles.ofMachine(running, 0), longest, (angle, weight) -> {
+        TurnQuadrature.over(BreakAngles.forMachineIntegrals(running, 0), longest, (angle, weight) -> {
             value[0] = instant.turnTo(angle).at(throwIndex, column);
             sums.add(angle, weight, value);
         });

@@ -35,14 +35,14 @@ public record Summary(
      * Power and flow by stage.
      *
      * @param indicatedPower W, positive when absorbed
-     * @param capacity kg/s; empty where a suction temperature is missing
-     * @param inletVolume m³/s at inlet conditions
+     * @param capacity kg/s; empty where a suction temperature is missing or a pressure is recorded
+     * @param inletVolume m³/s at inlet conditions; empty where a pressure is recorded
      * @param totalPower W, every chamber counted
      */
     public record StageFlows(
             Map<String, Double> indicatedPower,
             Map<String, OptionalDouble> capacity,
-            Map<String, Double> inletVolume,
+            Map<String, OptionalDouble> inletVolume,
             double totalPower) {}
 
     /** Sums up one throw; an earlier summary lends its geometry. */
@@ -93,14 +93,8 @@ public record Summary(
 
     private static StageFlows add(StageFlows a, StageFlows b) {
         b.indicatedPower().forEach((stage, power) -> a.indicatedPower().merge(stage, power, Double::sum));
-        b.inletVolume().forEach((stage, volume) -> a.inletVolume().merge(stage, volume, Double::sum));
-        b.capacity().forEach((stage, mass) -> a.capacity()
-                .merge(
-                        stage,
-                        mass,
-                        (x, y) -> x.isPresent() && y.isPresent()
-                                ? OptionalDouble.of(x.getAsDouble() + y.getAsDouble())
-                                : OptionalDouble.empty()));
+        b.inletVolume().forEach((stage, volume) -> a.inletVolume().merge(stage, volume, TurnMeans::sum));
+        b.capacity().forEach((stage, mass) -> a.capacity().merge(stage, mass, TurnMeans::sum));
         return new StageFlows(a.indicatedPower(), a.capacity(), a.inletVolume(), a.totalPower() + b.totalPower());
     }
 

@@ -68,9 +68,13 @@ final class ThrowSettler {
     }
 
     private Optional<PressureCurve> solve(int chamberIndex, Chamber chamber) {
-        String path = "throws[" + index + "].chambers[" + chamberIndex + "].cycle.kind";
+        String path = "throws[" + index + "].chambers[" + chamberIndex + "].cycle";
+        Optional<CycleOutcome> alone = chamber.cycle().solveAlone(duty.condition(chamber.name()));
+        if (alone.isPresent()) {
+            return taken(path, alone.get());
+        }
         if (chamber.stage().isEmpty()) {
-            return refuse(path, "chambers without a stage are not solved by this version");
+            return refuse(path, "a " + chamber.cycle().kind() + " cycle needs a stage");
         }
         String stage = chamber.stage().get();
         StageConditions lines = duty.stages().get(stage);
@@ -83,7 +87,10 @@ final class ThrowSettler {
                 lines.suctionPressure().getAsDouble(),
                 lines.dischargePressure().getAsDouble(),
                 lines.suctionTemperature());
-        CycleOutcome outcome = cycle(machine, duty, described, chamber, known);
+        return taken(path, cycle(machine, duty, described, chamber, known));
+    }
+
+    private Optional<PressureCurve> taken(String path, CycleOutcome outcome) {
         return outcome.curve().isPresent() ? outcome.curve() : refuse(path, outcome.refusal());
     }
 

@@ -5,6 +5,7 @@ import java.util.OptionalDouble;
 import java.util.TreeMap;
 import throwbench.solver.balance.TurnQuadrature;
 import throwbench.solver.chamber.ChamberVolume;
+import throwbench.solver.chamber.PressureCurve;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.machine.Chamber;
 import throwbench.solver.mechanism.Angles;
@@ -31,7 +32,7 @@ final class TurnMeans {
         this.chamberPower = new double[running.chambers().size()];
         ThrowInstant instant = new ThrowInstant(machine, index);
         TurnQuadrature.over(
-                BreakAngles.ofThrow(machine, index),
+                BreakAngles.forIntegrals(machine, index),
                 LONGEST_PIECE,
                 (angle, weight) -> add(instant, angle, weight / Angles.TURN));
     }
@@ -90,19 +91,23 @@ final class TurnMeans {
         return byStage;
     }
 
-    private static OptionalDouble sum(OptionalDouble a, OptionalDouble b) {
+    /** A sum is known when both parts are. */
+    static OptionalDouble sum(OptionalDouble a, OptionalDouble b) {
         return a.isPresent() && b.isPresent()
                 ? OptionalDouble.of(a.getAsDouble() + b.getAsDouble())
                 : OptionalDouble.empty();
     }
 
-    /** Volume flow of one throw by stage at inlet conditions, m³/s. */
-    static Map<String, Double> inletVolumeByStage(RunningMachine running, int index) {
-        Map<String, Double> byStage = new TreeMap<>();
+    /** Volume flow of one throw by stage at inlet conditions, m³/s; empty where a chamber's flow is not known. */
+    static Map<String, OptionalDouble> inletVolumeByStage(RunningMachine running, int index) {
+        Map<String, OptionalDouble> byStage = new TreeMap<>();
         RunningThrow t = running.throwsInOrder().get(index);
         for (int c = 0; c < t.chambers().size(); c++) {
-            double volume = t.curves().get(c).inletVolumePerTurn() * running.turnsPerSecond();
-            t.chambers().get(c).stage().ifPresent(stage -> byStage.merge(stage, volume, Double::sum));
+            PressureCurve curve = t.curves().get(c);
+            OptionalDouble volume = curve.flowKnown()
+                    ? OptionalDouble.of(curve.inletVolumePerTurn() * running.turnsPerSecond())
+                    : OptionalDouble.empty();
+            t.chambers().get(c).stage().ifPresent(stage -> byStage.merge(stage, volume, TurnMeans::sum));
         }
         return byStage;
     }

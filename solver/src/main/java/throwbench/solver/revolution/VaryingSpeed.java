@@ -41,7 +41,7 @@ final class VaryingSpeed {
     static SpeedOutcome solve(RunningMachine steady, Driver driver, double rotatingInertia) {
         SpeedSolver solver = new SpeedSolver(new MachineLoad(steady), rotatingInertia, driver, steady.meanSpeed());
         SpeedCurve curve = steady.speedCurve();
-        double[] breaks = BreakAngles.ofMachine(steady, 0);
+        double[] breaks = BreakAngles.forMachineIntegrals(steady, 0);
         boolean stand = steady.throwsInOrder().stream()
                 .allMatch(t -> t.body().friction().guideCoefficient() == 0);
         for (int n = 0; n < MOST_ROUNDS && !stand; n++) {
@@ -50,7 +50,7 @@ final class VaryingSpeed {
                 return outcome;
             }
             curve = outcome.curve().get();
-            double[] moved = BreakAngles.ofMachine(steady.turning(curve), 0);
+            double[] moved = BreakAngles.forMachineIntegrals(steady.turning(curve), 0);
             stand = same(breaks, moved);
             breaks = moved;
         }

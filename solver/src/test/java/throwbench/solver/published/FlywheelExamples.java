@@ -53,17 +53,24 @@ final class FlywheelExamples {
     private FlywheelExamples() {}
 
     /** A torque by the angle with nothing else on the shaft. */
-    private record Diagram(DoubleUnaryOperator load, double[] read) implements ShaftLoad {
+    private static final class Diagram implements ShaftLoad {
+
+        private final DoubleUnaryOperator load;
+        private double torque;
+
+        Diagram(DoubleUnaryOperator load) {
+            this.load = load;
+        }
 
         @Override
         public void turnTo(double crankAngle, Approach approach, double speed, double acceleration) {
             double inside = approach == Approach.JUST_AFTER ? 1e-12 : -1e-12;
-            read[0] = load.applyAsDouble(crankAngle + inside);
+            torque = load.applyAsDouble(crankAngle + inside);
         }
 
         @Override
         public double torque() {
-            return read[0];
+            return torque;
         }
 
         @Override
@@ -78,7 +85,7 @@ final class FlywheelExamples {
     }
 
     private static SpeedSolver solver(PublishedRow row, double inertia) {
-        Diagram diagram = new Diagram(load(row), new double[1]);
+        Diagram diagram = new Diagram(load(row));
         return new SpeedSolver(diagram, inertia, new Driver.ConstantTorque(), speed(row) / turns(row));
     }
 

@@ -68,7 +68,7 @@ public final class RevolutionJson implements Written {
         writeValveEvents(json);
         json.numbers("indicatedPower_W", summary.throwFlow().indicatedPower());
         json.optionalNumbers("capacity_kg_s", summary.throwFlow().capacity());
-        json.numbers("inletVolume_m3_s", summary.throwFlow().inletVolume());
+        json.optionalNumbers("inletVolume_m3_s", summary.throwFlow().inletVolume());
         json.number("meanThrowTorque_N_m", summary.meanThrowTorque());
         json.number("meanShaftTorque_N_m", summary.meanShaftTorque());
         json.number("speedFluctuation", summary.speedFluctuation());
@@ -76,7 +76,7 @@ public final class RevolutionJson implements Written {
         json.begin("machine");
         json.number("indicatedPower_W", summary.machineFlow().totalPower());
         json.optionalNumbers("capacity_kg_s", summary.machineFlow().capacity());
-        json.numbers("inletVolume_m3_s", summary.machineFlow().inletVolume());
+        json.optionalNumbers("inletVolume_m3_s", summary.machineFlow().inletVolume());
         json.end();
         json.beginList("notes");
         for (String note : notes()) {
