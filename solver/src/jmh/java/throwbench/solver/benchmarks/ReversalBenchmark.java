@@ -32,8 +32,7 @@ public class ReversalBenchmark {
     @Setup
     public void prepare() {
         machine = Booster.machine(mechanism);
-        earlier = Traces.of(
-                Booster.running(machine, Booster.SPEED, Booster.SUCTION), 0, Optional.empty());
+        earlier = Traces.of(Booster.running(machine, Booster.SPEED, Booster.SUCTION), 0, Optional.empty());
     }
 
     @Benchmark

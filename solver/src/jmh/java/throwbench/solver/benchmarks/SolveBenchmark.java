@@ -62,8 +62,7 @@ public class SolveBenchmark {
     /** As a dragged speed. */
     @Benchmark
     public Revolution allColumnsKeptGeometry() {
-        return Revolution.solve(
-                Booster.running(machine, speed(), Booster.SUCTION), 0, STATIONS, Optional.of(earlier));
+        return Revolution.solve(Booster.running(machine, speed(), Booster.SUCTION), 0, STATIONS, Optional.of(earlier));
     }
 
     /** The yardstick. */

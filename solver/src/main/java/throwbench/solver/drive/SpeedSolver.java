@@ -106,7 +106,9 @@ public final class SpeedSolver {
                 }
             }
             if (step(closing())) {
-                return SpeedOutcome.solved(curve());
+                SpeedCurve curve = curve();
+                // between the nodes of a shaft that all but stops the polynomial falls below 0
+                return curve.least() > 0 ? SpeedOutcome.solved(curve) : SpeedOutcome.refused(refusal());
             }
         }
         return SpeedOutcome.refused(refusal());
@@ -212,7 +214,7 @@ public final class SpeedSolver {
         List<SpeedPiece> next = new ArrayList<>();
         double allowed = TORQUE_MISSED * greatestTorque + SPEED_ROUNDING * perSpeed * meanSpeed;
         for (SpeedPiece piece : pieces) {
-            if (piece.length > SHORTEST_PIECE && missed(piece, curve) > allowed) {
+            if (piece.length > SHORTEST_PIECE && !(missed(piece, curve) <= allowed)) {
                 next.add(new SpeedPiece(piece.from, piece.length / 2, curve));
                 next.add(new SpeedPiece(piece.from + piece.length / 2, piece.length / 2, curve));
             } else {
