@@ -97,7 +97,15 @@ public final class Bench {
      * @return what is wrong with it; empty when it was taken
      */
     public List<Fault> edit(String path, String text, String name, boolean joins) {
-        MachineDocument next = document().with(document().path(path), text);
+        return change(document().with(document().path(path), text), name, path, joins);
+    }
+
+    /** Takes a value out of the file, so that its default holds; what is wrong with that is returned. */
+    public List<Fault> leaveOut(String path, String name) {
+        return change(document().without(document().path(path)), name, path, false);
+    }
+
+    private List<Fault> change(MachineDocument next, String name, String path, boolean joins) {
         if (next.equals(document())) {
             return List.of();
         }

@@ -37,6 +37,9 @@ public record Framing(double scale, double originX, double originY) {
         /** A framing stays while it is at least so large as a share of the largest one, and everything is inside. */
         private static final double LARGE_ENOUGH = 0.93;
 
+        /** How far into the border it may reach then, points at weight 1. */
+        private static final double SLACK = 6;
+
         /**
          * The largest framing in which the machine at every angle, its arrows and its dead-centre marks stay inside the
          * room, in its middle.
@@ -62,7 +65,7 @@ public record Framing(double scale, double originX, double originY) {
             arrows(reach, layout.of(shown), peaks, scale, weight);
             Box room = size.room();
             double k = Math.min(reach.scale(true, room.width()), reach.scale(false, room.height()));
-            if (before.isPresent() && before.get().scale() > LARGE_ENOUGH * k && reach.inside(before.get(), room)) {
+            if (before.isPresent() && before.get().scale() > LARGE_ENOUGH * k && reach.inside(before.get(), room, SLACK * weight)) {
                 return before.get();
             }
             double midX = room.x() + room.width() / 2 - reach.middle(true, k);
@@ -141,9 +144,8 @@ public record Framing(double scale, double originX, double originY) {
             return Math.max(least, 1);
         }
 
-        boolean inside(Framing f, Box room) {
+        boolean inside(Framing f, Box room, double slack) {
             double k = f.scale();
-            double slack = 1;
             return f.originX() + end(true, k, 1) <= room.x() + room.width() + slack
                     && f.originX() - end(true, k, -1) >= room.x() - slack
                     && f.originY() + end(false, k, -1) <= room.y() + room.height() + slack

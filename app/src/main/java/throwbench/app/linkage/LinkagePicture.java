@@ -67,8 +67,8 @@ public final class LinkagePicture {
                         .of(peaks, forceScale, before.map(LinkagePicture::framing)));
         Optional<Ghost> ghost = standing.held().map(Ghost::new);
         Scene scene = new Scene(shown, layout, this.framing, palette, choice, size, ghost);
-        this.headline = new Headline(scene, pen);
         this.still = new StillPainter(scene, forceScale, force, pen);
+        this.headline = new Headline(scene, pen, still.legendBox().x() - 10 * size.weight());
         LabelPlan plan = LabelPlan.of(
                 scene,
                 peaks,

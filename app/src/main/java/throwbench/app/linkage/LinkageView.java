@@ -50,7 +50,7 @@ public final class LinkageView extends Region implements View {
     private Optional<Shown> held = Optional.empty();
     private boolean stale = true;
     private double drawnAngle = Double.NaN;
-    private String spoken = "";
+    private boolean unspoken = true;
 
     public LinkageView(Playhead playhead) {
         this.playhead = playhead;
@@ -156,7 +156,8 @@ public final class LinkageView extends Region implements View {
         if (all || drawn == null) {
             drawn = settle(state, width, height);
         }
-        if (all || instant.crankAngle() != drawnAngle) {
+        boolean turned = all || instant.crankAngle() != drawnAngle;
+        if (turned) {
             clear(movingCanvas);
             drawn.paintMoving(movingPen, instant);
             clear(headlineCanvas);
@@ -164,7 +165,12 @@ public final class LinkageView extends Region implements View {
             drawnAngle = instant.crankAngle();
             hands.follow();
         }
-        speak(drawn, instant);
+        unspoken |= turned;
+        // who cannot see hears the angle and the load once the crank stands still
+        if (unspoken && !playhead.playing().get()) {
+            unspoken = false;
+            setAccessibleText("Linkage view. " + drawn.spoken(instant));
+        }
     }
 
     private LinkagePicture settle(Shown state, double width, double height) {
@@ -207,18 +213,6 @@ public final class LinkageView extends Region implements View {
     private static void clear(Canvas canvas) {
         canvas.getGraphicsContext2D()
                 .clearRect(canvas.getLayoutX(), canvas.getLayoutY(), canvas.getWidth(), canvas.getHeight());
-    }
-
-    /** Who cannot see hears the angle and the load once the crank stands still. */
-    private void speak(LinkagePicture drawn, Instant instant) {
-        if (playhead.playing().get()) {
-            return;
-        }
-        String sentence = drawn.spoken(instant);
-        if (!sentence.equals(spoken)) {
-            spoken = sentence;
-            setAccessibleText("Linkage view. " + sentence);
-        }
     }
 
     Optional<LinkagePicture> picture() {

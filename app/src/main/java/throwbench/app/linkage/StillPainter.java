@@ -47,10 +47,8 @@ final class StillPainter {
         double w = scene.weight();
         double border = scene.size().border();
         pen.font(11 * w, false);
-        double text = Math.max(
-                110 * w,
-                pen.width(pressure.number(range.least())) + 14 * w + pen.width(pressure.text(range.greatest())));
-        double narrow = Math.min(text, 0.3 * scene.size().width());
+        double texts = pen.width(pressure.number(range.least())) + 14 * w + pen.width(pressure.text(range.greatest()));
+        double narrow = Math.max(texts, Math.min(110 * w, 0.22 * scene.size().width()));
         legendBox = new Box(scene.size().width() - border - narrow, 14 * w, narrow, 28 * w);
         double foot = forceScale.barLength() + 10 * w + pen.width(force.text(forceScale.bar()));
         double hint = pen.width(HINT) + 28 * w;
@@ -108,7 +106,7 @@ final class StillPainter {
                 : Palette.mix(palette.ground().surface(), palette.ground().soft(), 0.55);
         ThrowLayout.Extent extent = layout.extent();
         double e = layout.linkage().guideOffset();
-        double over = drawn.metres(10 * w);
+        double over = drawn.metres(6 * w);
         drawn.pen().stroke(colour, 0.9 * w);
         drawn.pen().dash(14 * w, 4 * w, 2 * w, 4 * w);
         drawn.line(extent.leastX() - over, e, extent.greatestX() + over, e);

@@ -16,6 +16,7 @@ import javafx.scene.layout.Region;
 import org.jspecify.annotations.Nullable;
 import throwbench.app.bench.Playhead;
 import throwbench.app.bench.Shown;
+import throwbench.app.drawing.ColumnMenu;
 import throwbench.app.drawing.FxPen;
 import throwbench.app.drawing.Palette;
 import throwbench.app.drawing.PaletteStyle;
@@ -39,6 +40,9 @@ public final class StripView extends Region implements View {
     /** Points from an event's mark within which the mouse is on it. */
     private static final double NEAR = 4;
 
+    /** Width of the button from which traces are added. */
+    private static final double MENU = 30;
+
     private final Playhead playhead;
     private final Canvas still = new Canvas();
     private final Canvas values = new Canvas();
@@ -48,6 +52,7 @@ public final class StripView extends Region implements View {
     private final FxPen cursorPen = new FxPen(cursor.getGraphicsContext2D());
     private final Region focusFrame = new Region();
     private final Label hint = new Label();
+    private final ColumnMenu menu;
     private final PlaceField place;
     private final StripPainter painter = new StripPainter();
     private final CursorPainter cursorPainter = new CursorPainter();
@@ -71,6 +76,7 @@ public final class StripView extends Region implements View {
                 },
                 this::stopAt,
                 this::requestFocus);
+        this.menu = new ColumnMenu("Add traces or take them off", Lanes.ADDABLE, this::isAdded, this::trace);
         setId("revolution-strip");
         getStyleClass().add("revolution-strip");
         getStylesheets()
@@ -84,7 +90,7 @@ public final class StripView extends Region implements View {
         hint.setMouseTransparent(true);
         hint.setManaged(false);
         hint.setVisible(false);
-        getChildren().addAll(still, values, cursor, focusFrame, hint, place);
+        getChildren().addAll(still, values, cursor, focusFrame, hint, menu, place);
         setFocusTraversable(true);
         setAccessibleRole(AccessibleRole.SLIDER);
         setAccessibleText("Revolution strip");
@@ -127,6 +133,18 @@ public final class StripView extends Region implements View {
     /** Takes a trace that was added off again. */
     public void removeTrace(Column column) {
         stale |= added.remove(column);
+    }
+
+    private boolean isAdded(Column column) {
+        return added.contains(column);
+    }
+
+    private void trace(Column column, boolean on) {
+        if (on) {
+            addTrace(column);
+        } else {
+            removeTrace(column);
+        }
     }
 
     /** The columns that were added, in that order. */
@@ -174,6 +192,7 @@ public final class StripView extends Region implements View {
         size(values, LegendPainter.VALUE + 4, getHeight());
         size(cursor, 2 * CursorPainter.REACH, getHeight());
         values.setLayoutX(known.layout().left() - LegendPainter.VALUE - 10);
+        stillPen.clear(still.getWidth(), still.getHeight());
         painter.paint(stillPen, known, palette);
         requestLayout();
     }
@@ -205,7 +224,9 @@ public final class StripView extends Region implements View {
         }
         StripLayout layout = drawn.layout();
         double fieldHeight = place.prefHeight(-1);
-        place.resizeRelocate(8, Math.rint(layout.band().middle() - fieldHeight / 2), layout.left() - 20, fieldHeight);
+        place.resizeRelocate(
+                8, Math.rint(layout.band().middle() - fieldHeight / 2), layout.left() - 24 - MENU, fieldHeight);
+        menu.resizeRelocate(layout.left() - 12 - MENU, place.getLayoutY(), MENU, fieldHeight);
         focusFrame.resizeRelocate(
                 layout.left() - 4,
                 2,

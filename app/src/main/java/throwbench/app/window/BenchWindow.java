@@ -32,7 +32,7 @@ final class BenchWindow implements MachineMenu.Actions {
 
     private static final double LARGEST_HEIGHT = 1080;
     private static final double SHEET_SHARE = 0.165;
-    private static final double SHEET_LEAST = 282;
+    private static final double SHEET_LEAST = 304;
     private static final double SIDE_SHARE = 0.215;
     private static final double SIDE_LEAST = 300;
 

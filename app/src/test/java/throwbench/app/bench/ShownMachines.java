@@ -18,6 +18,7 @@ import throwbench.solver.load.ConnectingRod;
 import throwbench.solver.load.Crank;
 import throwbench.solver.load.Friction;
 import throwbench.solver.load.ReciprocatingMasses;
+import throwbench.solver.machine.Bookmark;
 import throwbench.solver.machine.Chamber;
 import throwbench.solver.machine.Drive;
 import throwbench.solver.machine.Driver;
@@ -99,6 +100,23 @@ public final class ShownMachines {
                 like.bookmarks());
     }
 
+    /** A machine with bookmarks. */
+    public static Machine withBookmarks(Machine like, List<Bookmark> bookmarks) {
+        return new Machine(
+                like.name(),
+                like.notes(),
+                like.site(),
+                like.drive(),
+                like.fluids(),
+                like.stages(),
+                like.throwsInOrder(),
+                like.dutyPoints(),
+                like.limits(),
+                like.loadSteps(),
+                like.ranges(),
+                bookmarks);
+    }
+
     /** A machine with other limits. */
     public static Machine withLimits(Machine like, Limits limits) {
         return new Machine(
@@ -134,9 +152,8 @@ public final class ShownMachines {
     }
 
     /** These machines are made from records: no file describes them, and no view reads one. */
-    private static final MachineDocument NO_FILE = MachineDocument.read("{}", AttachedFiles.NONE)
-            .document()
-            .orElseThrow();
+    private static final MachineDocument NO_FILE =
+            MachineDocument.read("{}", AttachedFiles.NONE).document().orElseThrow();
 
     /** The state of the bench for a duty point of a machine's first throw, SI. */
     public static Shown shown(Machine machine, int dutyIndex) {

@@ -177,7 +177,9 @@ class CommandLineTest {
     @Test
     void whatCannotBeSolvedIsRefusedWithItsPlace() throws IOException {
         Path cold = Run.machine(
-                folder, "\"molarMass\": \"27.2 g/mol\", \"isentropicExponent\": 1.29", "\"mixture\": { \"methane\": 1 }");
+                folder,
+                "\"molarMass\": \"27.2 g/mol\", \"isentropicExponent\": 1.29",
+                "\"mixture\": { \"methane\": 1 }");
         Run.machineWith(cold, text -> text.replace("\"32 degC\"", "\"-150 degC\""));
         String file = cold.toString();
         String reason = "the heat capacity of methane is known from 200 K to 1000 K, not at 123.1 K\n";

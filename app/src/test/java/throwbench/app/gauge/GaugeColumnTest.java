@@ -56,15 +56,15 @@ class GaugeColumnTest {
     void gaugesFitWithoutScrollingUntilThereAreTooMany(FxRobot robot) {
         assertTrue(contentHeight(robot) <= 330);
         robot.interact(() -> {
-            column.addGauge(Column.CRANK_PIN_X);
-            column.addGauge(Column.CRANK_PIN_Y);
-            column.addGauge(Column.SHAFT_TORQUE);
+            column.pick(Column.CRANK_PIN_X, true);
+            column.pick(Column.CRANK_PIN_Y, true);
+            column.pick(Column.SHAFT_TORQUE, true);
         });
         assertTrue(contentHeight(robot) > 330);
         robot.interact(() -> {
-            column.removeGauge(Column.CRANK_PIN_X);
-            column.removeGauge(Column.CRANK_PIN_Y);
-            column.removeGauge(Column.SHAFT_TORQUE);
+            column.pick(Column.CRANK_PIN_X, false);
+            column.pick(Column.CRANK_PIN_Y, false);
+            column.pick(Column.SHAFT_TORQUE, false);
         });
         assertTrue(contentHeight(robot) <= 330);
     }

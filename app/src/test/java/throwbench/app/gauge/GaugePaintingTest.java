@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.Set;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -28,7 +29,7 @@ import throwbench.solver.revolution.Instant;
 class GaugePaintingTest {
 
     private static List<Gauge> gauges(Shown shown) {
-        return Gauges.usual(shown.shownThrow()).stream()
+        return Gauges.of(shown.shownThrow(), Set.copyOf(Gauges.USUAL)).stream()
                 .map(s -> Gauge.of(s, shown))
                 .toList();
     }

@@ -46,7 +46,18 @@ final class Machines {
         return machine("Saltmarsh biogas booster", Rotation.COUNTER_CLOCKWISE, List.of(doubleActing("A", 0, 0, 0)));
     }
 
-    /** The same turning the other way, with the line of stroke above the crank centre. */
+    /** The same with every bore so many times as large. */
+    static Machine booster(double factor) {
+        List<Chamber> chambers = List.of(
+                chamber("A head", Side.HEAD, 0.32 * factor, 0, 0.14),
+                chamber("A crank", Side.CRANK, 0.32 * factor, 0.064, 0.16));
+        return machine(
+                "Saltmarsh biogas booster",
+                Rotation.COUNTER_CLOCKWISE,
+                List.of(of("A", 0, 0, new Linkage(0.075, 0.4, 0), new ReciprocatingMasses(38, 24, 42), chambers)));
+    }
+
+    /** The first turning the other way, with the line of stroke above the crank centre. */
     static Machine offset() {
         return machine("offset", Rotation.CLOCKWISE, List.of(doubleActing("A", 0, 0, 0.06)));
     }
@@ -117,13 +128,11 @@ final class Machines {
         RunningMachine settled =
                 RunningMachine.settle(solved, solved.dutyPoints().get(0)).get();
         RunningMachine running =
-                new RunningMachine(
-                        machine, machine.dutyPoints().get(0), settled.throwsInOrder(), settled.speedCurve());
+                new RunningMachine(machine, machine.dutyPoints().get(0), settled.throwsInOrder(), settled.speedCurve());
         Summary summary = Summary.of(running, throwIndex, Optional.empty());
         // these machines come from no file; the view reads nothing of it
-        MachineDocument none = MachineDocument.read("{}", AttachedFiles.NONE)
-                .document()
-                .orElseThrow();
+        MachineDocument none =
+                MachineDocument.read("{}", AttachedFiles.NONE).document().orElseThrow();
         return new Shown(none, machine, 0, throwIndex, summary, List.of(), UnitSystem.SI, 0);
     }
 

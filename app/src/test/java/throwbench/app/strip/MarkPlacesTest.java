@@ -12,6 +12,7 @@ import throwbench.app.drawing.Palette;
 import throwbench.app.drawing.RecordingPen;
 import throwbench.solver.chamber.PressureCurve;
 import throwbench.solver.chamber.ValveEvent;
+import throwbench.solver.machine.Bookmark;
 import throwbench.solver.machine.Machine;
 import throwbench.solver.mechanism.Angles;
 import throwbench.solver.revolution.RunningThrow;
@@ -153,6 +154,35 @@ class MarkPlacesTest {
                         .filter(t -> t.text().equals("HDC"))
                         .map(RecordingPen.Written::x)
                         .toList());
+    }
+
+    @Test
+    void bookmarksOfTheShownThrowAreMarkedAndThoseOfOthersAreNot() {
+        Machine machine = ShownMachines.withBookmarks(
+                ShownMachines.booster(),
+                List.of(new Bookmark("A", 2, "peak guide force"), new Bookmark("B", 3, "not of this throw")));
+        StripPlot plot = plot(machine, 0, 1200, 460);
+        List<StripEvent> marks = plot.events().all().stream()
+                .filter(e -> e.kind() == StripEvent.Kind.BOOKMARK)
+                .toList();
+        assertEquals(
+                List.of("peak guide force"),
+                marks.stream().map(StripEvent::name).toList());
+        assertEquals(2, marks.get(0).angle());
+        assertTrue(paint(plot).texts.stream().anyMatch(t -> t.text().equals("peak guide force")));
+    }
+
+    @Test
+    void theMouseIsToldWhatHappensAtItsAngle() {
+        StripPlot plot = plot(ShownMachines.booster(), 0, 1200, 460);
+        StripEvent opening = plot.events().all().stream()
+                .filter(e -> e.kind() == StripEvent.Kind.VALVE_OPENS)
+                .findFirst()
+                .orElseThrow();
+        double x = plot.layout().x(opening.angle());
+        assertTrue(plot.eventsAt(x + 3, 4).contains(opening.name()));
+        assertEquals("", plot.eventsAt(plot.layout().x(Math.toRadians(330)), 4));
+        assertTrue(plot.eventsAt(plot.layout().right(), 4).contains("HDC"), "360° is 0°");
     }
 
     @Test

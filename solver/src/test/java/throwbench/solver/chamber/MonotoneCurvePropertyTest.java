@@ -18,6 +18,7 @@ import throwbench.solver.trial.Numbers;
 class MonotoneCurvePropertyTest {
 
     /** A table and its curve. */
+    @SuppressWarnings("ArrayRecordComponent") // never compared
     record Table(double[] angles, double[] values, MonotoneCurve curve) {
 
         double angle(int k) {

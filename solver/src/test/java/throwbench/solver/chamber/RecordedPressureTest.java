@@ -18,8 +18,9 @@ import throwbench.solver.mechanism.Sweep;
 /** Recorded pressures: rows, the smooth curve between them, and what is refused. */
 class RecordedPressureTest {
 
-    private static final DoubleUnaryOperator SMOOTH =
-            angle -> 6e5 + 4e5 * Math.cos(angle - 0.3) + 5e4 * Math.sin(2 * angle);
+    private static double smooth(double angle) {
+        return 6e5 + 4e5 * Math.cos(angle - 0.3) + 5e4 * Math.sin(2 * angle);
+    }
 
     private static RecordedPressure sampled(DoubleUnaryOperator pressure, int rows, double first) {
         List<Double> angles = new ArrayList<>();
@@ -46,7 +47,7 @@ class RecordedPressureTest {
 
     @Test
     void stationsOnRowsHaveTheirPressures() {
-        RecordedPressure recorded = sampled(SMOOTH, 90, 0);
+        RecordedPressure recorded = sampled(RecordedPressureTest::smooth, 90, 0);
         double[] pressures = filled(recorded, 0, 360);
         for (int i = 0; i < 90; i++) {
             // both angles are 4° i, rounded apart
@@ -56,7 +57,7 @@ class RecordedPressureTest {
 
     @Test
     void lastRowJoinsTheFirst() {
-        RecordedPressure recorded = sampled(SMOOTH, 24, 0.2);
+        RecordedPressure recorded = sampled(RecordedPressureTest::smooth, 24, 0.2);
         double[] pressures = filled(recorded, 0, 3600);
         double greatestStep = 0;
         for (int i = 0; i < 3600; i++) {
@@ -79,9 +80,9 @@ class RecordedPressureTest {
         double greatest = 0;
         for (int shift = 0; shift < 10; shift++) {
             double first = shift * Angles.TURN / rows / 10;
-            double[] pressures = filled(sampled(SMOOTH, rows, first), 0, 3600);
+            double[] pressures = filled(sampled(RecordedPressureTest::smooth, rows, first), 0, 3600);
             for (int i = 0; i < 3600; i++) {
-                double exact = SMOOTH.applyAsDouble(i * Angles.TURN / 3600);
+                double exact = smooth(i * Angles.TURN / 3600);
                 greatest = Math.max(greatest, Math.abs(pressures[i] - exact));
             }
         }
@@ -90,7 +91,7 @@ class RecordedPressureTest {
 
     @Test
     void nothingIsKnownOfItsValves() {
-        RecordedPressure recorded = sampled(SMOOTH, 8, 0.2);
+        RecordedPressure recorded = sampled(RecordedPressureTest::smooth, 8, 0.2);
         PressureCurve curve = recorded.solveAlone(ChamberCondition.WORKING)
                 .orElseThrow()
                 .curve()
@@ -110,7 +111,7 @@ class RecordedPressureTest {
 
     @Test
     void statesAndPocketsAreRefused() {
-        RecordedPressure recorded = sampled(SMOOTH, 8, 0);
+        RecordedPressure recorded = sampled(RecordedPressureTest::smooth, 8, 0);
         assertEquals(
                 "a recorded pressure cannot be had held-open: it is what was measured",
                 recorded.solveAlone(new ChamberCondition(ChamberState.HELD_OPEN, 0, Clearance.NONE))
@@ -125,7 +126,7 @@ class RecordedPressureTest {
 
     @Test
     void tablesThatAreNoneAreRefused() {
-        RecordedPressure good = sampled(SMOOTH, 8, 0);
+        RecordedPressure good = sampled(RecordedPressureTest::smooth, 8, 0);
         List<Double> pressures = good.pressures();
         assertRefused(good.crankAngles().subList(0, 7), pressures.subList(0, 7), "7 crank angles and 7 pressures");
         assertRefused(good.crankAngles(), pressures.subList(0, 7), "8 crank angles and 7 pressures");
