@@ -23,6 +23,7 @@ public final class PaletteStyle {
                 + colour("accent", ground.accent())
                 + colour("on-accent", ground.onAccent())
                 + colour("chosen", Palette.mix(ground.surface(), ground.accent(), 0.09))
+                + colour("hover", Palette.mix(ground.surface(), ground.accent(), 0.035))
                 + colour("met", verdicts.met())
                 + colour("not-met", verdicts.notMet())
                 + colour("not-judged", verdicts.notJudged());

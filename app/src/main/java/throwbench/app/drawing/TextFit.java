@@ -5,6 +5,11 @@ public final class TextFit {
 
     private TextFit() {}
 
+    /** The name where it fits, else the short one, else as much of the short one as fits. */
+    public static String name(Pen pen, String name, String shortName, double width) {
+        return pen.width(name) <= width ? name : elide(pen, shortName, width);
+    }
+
     /**
      * The text, or as much of it as fits with an ellipsis in its middle: the ends of names tell them apart ("Booster A
      * head", "Booster A crank").

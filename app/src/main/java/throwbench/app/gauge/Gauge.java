@@ -1,9 +1,12 @@
 package throwbench.app.gauge;
 
+import java.util.List;
 import java.util.OptionalDouble;
 import throwbench.app.bench.Shown;
 import throwbench.app.drawing.Readout;
+import throwbench.app.drawing.ShortNames;
 import throwbench.app.drawing.Signal;
+import throwbench.solver.machine.Chamber;
 import throwbench.solver.machine.LimitKey;
 import throwbench.solver.revolution.Column;
 import throwbench.solver.revolution.Extremes;
@@ -11,6 +14,7 @@ import throwbench.solver.revolution.Extremes;
 /**
  * One gauge: a quantity, its extremes over the revolution and what limits it. Values in SI.
  *
+ * @param shortTitle where the title finds no room
  * @param lowLimit least value allowed (a rating in compression, negative)
  * @param highLimit greatest value allowed
  * @param bySign whether its value is coloured by tension and compression
@@ -18,6 +22,7 @@ import throwbench.solver.revolution.Extremes;
 public record Gauge(
         Signal signal,
         String title,
+        String shortTitle,
         Extremes extremes,
         OptionalDouble lowLimit,
         OptionalDouble highLimit,
@@ -38,10 +43,18 @@ public record Gauge(
         OptionalDouble low = push.isPresent() ? OptionalDouble.of(-push.getAsDouble()) : push;
         Extremes extremes = signal.extremes(shown.summary());
         Readout readout = signal.readout(shown.units(), shown.summary());
-        boolean pressure = signal instanceof Signal.OfPressure;
+        String title = signal.title(shown.shownThrow());
+        String shortTitle = title;
+        if (signal instanceof Signal.OfPressure pressure) {
+            List<String> names =
+                    shown.shownThrow().chambers().stream().map(Chamber::name).toList();
+            shortTitle = "pressure, " + ShortNames.of(names).get(pressure.chamber());
+            title = "pressure, " + title;
+        }
         return new Gauge(
                 signal,
-                (pressure ? "pressure, " : "") + signal.title(shown.shownThrow()),
+                title,
+                shortTitle,
                 extremes,
                 low,
                 high,

@@ -37,7 +37,7 @@ final class GaugePainter {
         double value = Math.max(width(pen, gauge, layout, true), width(pen, gauge, layout, false));
         pen.font(layout.nameSize(), false);
         double room = layout.right() - unitWidth - UNIT_GAP - value - 10 - layout.left();
-        pen.text(TextFit.elide(pen, gauge.title(), room), layout.left(), base, Pen.Align.LEFT);
+        pen.text(TextFit.name(pen, gauge.title(), gauge.shortTitle(), room), layout.left(), base, Pen.Align.LEFT);
         track(pen, gauge, layout, i, palette);
         double top = layout.barTop(i);
         double bottom = top + layout.barHeight();

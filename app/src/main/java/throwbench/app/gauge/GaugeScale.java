@@ -27,7 +27,7 @@ public record GaugeScale(double from, double to) {
         if (high.isPresent()) {
             greatest = Math.max(greatest, readout.inUnit(high.getAsDouble()) * BEYOND);
         }
-        double from = -round(-least);
+        double from = 0 - round(-least);
         double to = round(greatest);
         return to > from ? new GaugeScale(from, to) : new GaugeScale(0, 1);
     }

@@ -2,6 +2,7 @@ package throwbench.app.strip;
 
 import throwbench.app.drawing.Palette;
 import throwbench.app.drawing.Pen;
+import throwbench.app.drawing.TextFit;
 
 /** The degree axis with its grid, and the dead centres of the shown throw. */
 final class AxisPainter {
@@ -32,6 +33,10 @@ final class AxisPainter {
         }
         pen.stroke(palette.ground().ink(), 1.4);
         pen.line(layout.left(), foot, layout.right(), foot);
+        pen.font(SIZE - 1, false);
+        pen.fill(palette.ground().soft());
+        String name = "crank angle, throw " + plot.shown().shownThrow().name();
+        pen.text(TextFit.name(pen, name, "crank angle", layout.left() - 36), 10, foot + 18, Pen.Align.LEFT);
         deadCentres(pen, plot, palette);
     }
 

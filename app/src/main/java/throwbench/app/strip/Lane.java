@@ -11,7 +11,7 @@ public record Lane(Kind kind, List<StripTrace> traces) {
     public enum Kind {
         LOADS("loads", 2.4),
         FORCES("forces", 1.5),
-        PRESSURE("pressure", 1.3),
+        PRESSURE("pressure", 1.4),
         TORQUE("torque", 1),
         COUPLE("couples", 1),
         SPEED("speed", 0.9),

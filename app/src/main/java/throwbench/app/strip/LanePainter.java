@@ -39,7 +39,7 @@ final class LanePainter {
         StripLayout layout = plot.layout();
         LaneScale scale = plot.scale(lane);
         if (lane > 0) {
-            double y = Math.rint(scale.top() - 3.5) + 0.5;
+            double y = Math.rint(scale.top() - 3) + 0.5;
             pen.stroke(palette.ground().grid(), 1);
             pen.line(8, y, layout.width() - 8, y);
         }

@@ -1,10 +1,13 @@
 package throwbench.app.strip;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import throwbench.app.drawing.ColumnWords;
+import throwbench.app.drawing.ShortNames;
 import throwbench.app.drawing.Signal;
+import throwbench.solver.machine.Chamber;
 import throwbench.solver.machine.Throw;
 import throwbench.solver.revolution.Column;
 
@@ -14,6 +17,11 @@ public final class Lanes {
     /** Columns that are always shown. */
     static final List<Column> USUAL =
             List.of(Column.GAS_LOAD, Column.INERTIA_LOAD, Column.ROD_LOAD, Column.THROW_TORQUE, Column.VELOCITY);
+
+    /** Columns that may be added: the others, without the axis itself. */
+    static final List<Column> ADDABLE = Arrays.stream(Column.values())
+            .filter(c -> c != Column.CRANK_ANGLE && !USUAL.contains(c))
+            .toList();
 
     private Lanes() {}
 
@@ -43,14 +51,16 @@ public final class Lanes {
     }
 
     private static StripTrace trace(Column column, String name, Dash dash, boolean strong) {
-        return new StripTrace(new Signal.OfColumn(column), name, dash, strong, false);
+        return new StripTrace(new Signal.OfColumn(column), name, name, dash, strong, false);
     }
 
     private static Lane pressures(Throw shown) {
         List<StripTrace> traces = new ArrayList<>();
-        for (int c = 0; c < shown.chambers().size(); c++) {
-            String name = shown.chambers().get(c).name();
-            traces.add(new StripTrace(new Signal.OfPressure(c), name, dash(c), false, false));
+        List<String> names = shown.chambers().stream().map(Chamber::name).toList();
+        List<String> shortNames = ShortNames.of(names);
+        for (int c = 0; c < names.size(); c++) {
+            traces.add(
+                    new StripTrace(new Signal.OfPressure(c), names.get(c), shortNames.get(c), dash(c), false, false));
         }
         return new Lane(Lane.Kind.PRESSURE, traces);
     }
@@ -68,7 +78,8 @@ public final class Lanes {
     }
 
     private static StripTrace added(Column column, int place) {
-        return new StripTrace(new Signal.OfColumn(column), ColumnWords.title(column), dash(place), false, true);
+        String name = ColumnWords.title(column);
+        return new StripTrace(new Signal.OfColumn(column), name, name, dash(place), false, true);
     }
 
     private static Dash dash(int place) {

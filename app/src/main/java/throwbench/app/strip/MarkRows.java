@@ -7,8 +7,8 @@ import throwbench.app.drawing.Pen;
 
 /**
  * Names of marks placed in rows so that none overlaps another: the most telling ones first, each in the first row with room
- * for its name at the right of its mark, else at the left, else for its short name; a name without room is left out, its
- * mark stays.
+ * for its name at the right of its mark, else at the left, else for its short name; what finds no room is left out: its mark
+ * still stands on its trace.
  */
 final class MarkRows {
 
@@ -17,8 +17,7 @@ final class MarkRows {
     /**
      * A placed name.
      *
-     * @param row index of the row, -1 where only the mark stands
-     * @param text empty where the name found no room
+     * @param row index of the row
      * @param from left end of the text
      * @param to right end of it
      */
@@ -57,7 +56,6 @@ final class MarkRows {
                 }
             }
         }
-        placed.add(new Placed(event, x, rows - 1, "", x, x));
     }
 
     private boolean free(int row, double from, double to, double x) {

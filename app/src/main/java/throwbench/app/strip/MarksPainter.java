@@ -3,6 +3,7 @@ package throwbench.app.strip;
 import java.util.List;
 import throwbench.app.drawing.Palette;
 import throwbench.app.drawing.Pen;
+import throwbench.solver.revolution.Extremes;
 
 /** Named marks of sign changes, peaks and bookmarks under the band, and the same marks on the traces they belong to. */
 final class MarksPainter {
@@ -14,27 +15,16 @@ final class MarksPainter {
 
     void paint(Pen pen, StripPlot plot, Palette palette) {
         StripLayout layout = plot.layout();
+        onTrace(pen, plot, palette);
         pen.font(SIZE, true);
         List<MarkRows.Placed> placed = MarkRows.place(pen, layout, plot.events().all());
-        onTrace(pen, plot, palette);
-        if (!layout.markRows().isEmpty()) {
-            for (MarkRows.Placed mark : placed) {
-                StripLayout.Row row = layout.markRows().get(Math.max(0, mark.row()));
-                if (!mark.text().isEmpty()) {
-                    pen.fill(palette.ground().surface(), 0.85);
-                    pen.rect(
-                            mark.from() - 2,
-                            row.top() + 1,
-                            mark.to() - mark.from() + 4,
-                            row.height() - 2,
-                            2,
-                            true,
-                            false);
-                }
-                pen.fill(palette.ground().ink());
-                symbol(pen, mark.event().kind(), mark.x(), row.middle(), 4);
-                pen.text(mark.text(), mark.from(), row.middle() + 4, Pen.Align.LEFT);
-            }
+        for (MarkRows.Placed mark : placed) {
+            StripLayout.Row row = layout.markRows().get(mark.row());
+            pen.fill(palette.ground().surface(), 0.85);
+            pen.rect(mark.from() - 2, row.top() + 1, mark.to() - mark.from() + 4, row.height() - 2, 2, true, false);
+            pen.fill(palette.ground().ink());
+            symbol(pen, mark.event().kind(), mark.x(), row.middle(), 4);
+            pen.text(mark.text(), mark.from(), row.middle() + 4, Pen.Align.LEFT);
         }
     }
 
@@ -58,19 +48,13 @@ final class MarksPainter {
             if (event.kind() == StripEvent.Kind.SIGN_CHANGE) {
                 symbol(pen, event.kind(), x, scale.y(0), 4);
             } else if (event.kind() == StripEvent.Kind.PEAK) {
-                boolean top =
-                        event.angle() == plot.extremes(lane, trace).greatest().crankAngle();
-                double y = scale.y(
-                        top
-                                ? scaleTop(plot, lane, trace)
-                                : plot.extremes(lane, trace).least().value());
-                pen.circle(x, y, 3.2, true, false);
+                Extremes extremes = plot.extremes(lane, trace);
+                boolean top = event.angle() == extremes.greatest().crankAngle();
+                double peak =
+                        top ? extremes.greatest().value() : extremes.least().value();
+                pen.circle(x, scale.y(peak), 3.2, true, false);
             }
         }
-    }
-
-    private static double scaleTop(StripPlot plot, int lane, int trace) {
-        return plot.extremes(lane, trace).greatest().value();
     }
 
     /** A lozenge for a sign change, a triangle for a peak, a flag for a bookmark. */

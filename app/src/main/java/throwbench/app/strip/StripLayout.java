@@ -28,6 +28,7 @@ record StripLayout(
 
     private static final double EDGE = 8;
     private static final double LANE_GAP = 7;
+    private static final double TIGHT_GAP = 5;
     private static final double MARK_ROW = 15;
     private static final double VALVE_ROW = 16;
 
@@ -44,9 +45,9 @@ record StripLayout(
     }
 
     static StripLayout of(double width, double height, List<Lane> lanes, int chambers) {
-        double left = Math.rint(Math.max(140, Math.min(182, 0.19 * width)));
+        double left = Math.rint(Math.max(146, Math.min(182, 0.19 * width)));
         double right = Math.max(left + 60, width - (width >= 700 ? 62 : 54));
-        double bandHeight = height >= 400 ? 31 : height >= 300 ? 27 : height >= 240 ? 23 : 20;
+        double bandHeight = height >= 400 ? 31 : height >= 230 ? 27 : 20;
         Row band = new Row(EDGE, EDGE + bandHeight);
         double y = band.bottom() + 2;
         List<Row> marks = new ArrayList<>();
@@ -65,18 +66,32 @@ record StripLayout(
             }
         }
         return new StripLayout(
-                width, height, left, right, band, List.copyOf(marks), stack(lanes, y + 3, bottom - 4), valves, axis);
+                width,
+                height,
+                left,
+                right,
+                band,
+                List.copyOf(marks),
+                stack(lanes, y + 3, bottom - 4, height >= 260 ? LANE_GAP : TIGHT_GAP),
+                valves,
+                axis);
     }
 
-    private static List<Row> stack(List<Lane> lanes, double top, double bottom) {
+    /** Every lane gets what its legend needs, and of the rest a share by its weight. */
+    private static List<Row> stack(List<Lane> lanes, double top, double bottom, double gap) {
         double weights = lanes.stream().mapToDouble(Lane::weight).sum();
-        double room = Math.max(lanes.size() * 6.0, bottom - top - LANE_GAP * (lanes.size() - 1));
+        double room = Math.max(lanes.size() * 6.0, bottom - top - gap * (lanes.size() - 1));
+        double needs = lanes.stream()
+                .mapToDouble(l -> LegendPainter.need(l.traces().size()))
+                .sum();
+        double kept = Math.min(1, room / needs);
         List<Row> rows = new ArrayList<>();
         double y = top;
         for (Lane lane : lanes) {
-            double share = room * lane.weight() / weights;
+            double share =
+                    kept * LegendPainter.need(lane.traces().size()) + (room - kept * needs) * lane.weight() / weights;
             rows.add(new Row(y, y + share));
-            y += share + LANE_GAP;
+            y += share + gap;
         }
         return List.copyOf(rows);
     }

@@ -2,6 +2,7 @@ package throwbench.app.strip;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Collectors;
 import throwbench.app.bench.Shown;
 import throwbench.app.drawing.Readout;
 import throwbench.app.drawing.Signal;
@@ -109,6 +110,15 @@ final class StripPlot {
     /** How the numbers of a trace are written. */
     Readout readout(int lane, int trace) {
         return readouts.get(lane).get(trace);
+    }
+
+    /** Names of the events whose marks stand within a distance (points) of an x, a line each; empty where none does. */
+    String eventsAt(double at, double near) {
+        return events.all().stream()
+                .filter(e -> Math.abs(layout.x(e.angle()) - at) <= near
+                        || (e.angle() == 0 && Math.abs(layout.right() - at) <= near))
+                .map(StripEvent::name)
+                .collect(Collectors.joining("\n"));
     }
 
     StripEvents events() {

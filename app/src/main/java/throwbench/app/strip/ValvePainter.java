@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import throwbench.app.drawing.Palette;
 import throwbench.app.drawing.Pen;
+import throwbench.app.drawing.ShortNames;
 import throwbench.app.drawing.TextFit;
 import throwbench.solver.chamber.ChamberState;
 import throwbench.solver.chamber.ValveEvent;
@@ -45,8 +46,10 @@ final class ValvePainter {
         StripLayout layout = plot.layout();
         RunningThrow running =
                 plot.shown().running().throwsInOrder().get(plot.shown().throwIndex());
+        List<String> shortNames =
+                ShortNames.of(running.chambers().stream().map(Chamber::name).toList());
         for (int c = 0; c < layout.valveRows().size(); c++) {
-            row(pen, plot, running, c, palette);
+            row(pen, plot, running, c, shortNames, palette);
         }
         for (StripEvent event : plot.events().all()) {
             if (event.kind().ofValve()) {
@@ -55,13 +58,18 @@ final class ValvePainter {
         }
     }
 
-    private static void row(Pen pen, StripPlot plot, RunningThrow running, int c, Palette palette) {
+    private static void row(
+            Pen pen, StripPlot plot, RunningThrow running, int c, List<String> shortNames, Palette palette) {
         StripLayout layout = plot.layout();
         double y = layout.valveRows().get(c).middle();
         Chamber chamber = running.chambers().get(c);
         pen.font(SIZE, false);
         pen.fill(palette.ground().soft());
-        pen.text(TextFit.elide(pen, "valves " + chamber.name(), layout.left() - 24), 10, y + 4, Pen.Align.LEFT);
+        pen.text(
+                TextFit.name(pen, "valves " + chamber.name(), "valves " + shortNames.get(c), layout.left() - 24),
+                10,
+                y + 4,
+                Pen.Align.LEFT);
         List<Open> stretches = open(running.curves().get(c).events());
         for (Open open : stretches) {
             piece(pen, layout, y, open, Math.max(0, open.from()), Math.min(Angles.TURN, open.to()), palette);

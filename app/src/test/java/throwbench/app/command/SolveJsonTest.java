@@ -132,7 +132,7 @@ class SolveJsonTest {
                 summary.get("capacity_kg_s").get("first").doubleValue(),
                 0);
         assertEquals(
-                first(expected.throwFlow().inletVolume()),
+                first(expected.throwFlow().inletVolume()).orElseThrow(),
                 summary.get("inletVolume_m3_s").get("first").doubleValue(),
                 0);
         assertEquals(

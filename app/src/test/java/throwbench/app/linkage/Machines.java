@@ -10,7 +10,6 @@ import throwbench.solver.chamber.IdealValves;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.attached.AttachedFiles;
-import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.fluid.Fluid;
 import throwbench.solver.fluid.Liquid;
@@ -129,12 +128,11 @@ final class Machines {
         RunningMachine settled =
                 RunningMachine.settle(solved, solved.dutyPoints().get(0)).get();
         RunningMachine running =
-                new RunningMachine(machine, machine.dutyPoints().get(0), settled.throwsInOrder());
+                new RunningMachine(machine, machine.dutyPoints().get(0), settled.throwsInOrder(), settled.speedCurve());
         Summary summary = Summary.of(running, throwIndex, Optional.empty());
         // these machines come from no file; the view reads nothing of it
-        MachineDocument none = MachineDocument.read("{}", AttachedFiles.NONE, GasNames.TABLE)
-                .document()
-                .orElseThrow();
+        MachineDocument none =
+                MachineDocument.read("{}", AttachedFiles.NONE).document().orElseThrow();
         return new Shown(none, machine, 0, throwIndex, summary, List.of(), UnitSystem.SI, 0);
     }
 

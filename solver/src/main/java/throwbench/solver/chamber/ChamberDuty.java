@@ -7,6 +7,7 @@ import throwbench.solver.mechanism.Rotation;
 /**
  * All that a cycle needs to be solved.
  *
+ * @param volume with a clearance above 0
  * @param meanSpeed of the shaft, rad/s: cycles run at the constant mean speed
  * @param flowAllowance share of the capacity lost to heating, leakage and slip
  */
@@ -19,6 +20,12 @@ public record ChamberDuty(
         ChamberCondition condition,
         double meanSpeed,
         double flowAllowance) {
+
+    public ChamberDuty {
+        if (!(volume.clearance() > 0)) {
+            throw new IllegalArgumentException("a cycle needs a clearance above 0, not " + volume.clearance() + " m3");
+        }
+    }
 
     /** The crank angle (rad) at which the chamber has a volume (m³), on the stroke on which it grows or falls. */
     double crankAngleAt(double chamberVolume, boolean growing) {

@@ -21,6 +21,9 @@ final class IdealValveCycle implements PressureCurve {
         HELD_OPEN
     }
 
+    private static final String NO_TEMPERATURE =
+            "capacity by mass and discharge temperature need a suctionTemperature at the duty point";
+
     private final Way way;
     private final double low;
     private final double high;
@@ -129,7 +132,14 @@ final class IdealValveCycle implements PressureCurve {
                 ? OptionalDouble.of(temperature.getAsDouble() * Math.pow(high / low, (nt - 1) / nt))
                 : OptionalDouble.empty();
         return new IdealValveCycle(
-                Way.WORKING, low, high, nc, ne, List.copyOf(events), new Passed(inletVolume, mass, discharged), "");
+                Way.WORKING,
+                low,
+                high,
+                nc,
+                ne,
+                List.copyOf(events),
+                new Passed(inletVolume, mass, discharged),
+                temperature.isPresent() ? "" : NO_TEMPERATURE);
     }
 
     private static ValveEvent event(ValveEvent.Valve valve, boolean opens, double crankAngle) {

@@ -17,8 +17,15 @@ public final class BreakAngles {
 
     private BreakAngles() {}
 
-    /** Those of one throw, in its own crank angle: rad, rising, in [0, 2π). */
+    /**
+     * Those of one throw's curves, in its own crank angle: rad, rising, in [0, 2π). Where the speed varies, every throw's
+     * events reach it through the shaft's acceleration.
+     */
     public static double[] ofThrow(RunningMachine running, int throwIndex) {
+        return running.speedCurve().constant() ? own(running, throwIndex) : ofMachine(running, throwIndex);
+    }
+
+    private static double[] own(RunningMachine running, int throwIndex) {
         double[] steps = steps(running, throwIndex);
         boolean friction =
                 running.throwsInOrder().get(throwIndex).body().friction().guideCoefficient() != 0;
@@ -30,7 +37,7 @@ public final class BreakAngles {
         DoubleStream all = DoubleStream.empty();
         for (int i = 0; i < running.throwsInOrder().size(); i++) {
             double shift = running.angleBetween(shown, i);
-            all = DoubleStream.concat(all, stream(ofThrow(running, i)).map(angle -> Angles.wrap(angle - shift)));
+            all = DoubleStream.concat(all, stream(own(running, i)).map(angle -> Angles.wrap(angle - shift)));
         }
         return sorted(all);
     }
@@ -46,6 +53,30 @@ public final class BreakAngles {
         return sorted(DoubleStream.concat(deadCentres, events));
     }
 
+    /** Those of a throw and the joints of its pressure curves: what an integral over the revolution is split at. */
+    static double[] forIntegrals(RunningMachine running, int throwIndex) {
+        if (!running.speedCurve().constant()) {
+            return forMachineIntegrals(running, throwIndex);
+        }
+        return sorted(DoubleStream.concat(stream(own(running, throwIndex)), joints(running, throwIndex)));
+    }
+
+    /** The same of all throws, in the crank angle of one of them. */
+    static double[] forMachineIntegrals(RunningMachine running, int shown) {
+        DoubleStream all = stream(ofMachine(running, shown));
+        for (int i = 0; i < running.throwsInOrder().size(); i++) {
+            double shift = running.angleBetween(shown, i);
+            all = DoubleStream.concat(all, joints(running, i).map(angle -> Angles.wrap(angle - shift)));
+        }
+        return sorted(all);
+    }
+
+    private static DoubleStream joints(RunningMachine running, int throwIndex) {
+        return running.throwsInOrder().get(throwIndex).curves().stream()
+                .map(PressureCurve::joints)
+                .flatMapToDouble(Arrays::stream);
+    }
+
     /** Where the guide force changes its sign, |N| and with it the guide's friction bend. */
     private static DoubleStream guideChanges(RunningMachine running, int throwIndex, double[] steps) {
         RunningThrow t = running.throwsInOrder().get(throwIndex);
@@ -53,8 +84,9 @@ public final class BreakAngles {
         ThrowStations stations =
                 new ThrowStations(t, sweep, running.machine().site().framePressure(), List.of());
         double[] speed = new double[Trace.STATIONS];
-        Arrays.fill(speed, running.meanSpeed());
-        stations.solve(speed, new double[Trace.STATIONS]);
+        double[] alpha = new double[Trace.STATIONS];
+        running.fillSpeed(throwIndex, sweep.crankAngle(), Approach.JUST_AFTER, speed, alpha);
+        stations.solve(speed, alpha);
         ThrowInstant instant = new ThrowInstant(running, throwIndex);
         Trace guide = new Trace(
                 (angle, side) -> instant.turnTo(angle, side).at(Column.GUIDE_FORCE),

@@ -56,6 +56,19 @@ public final class Trace {
 
     private final int count;
 
+    /**
+     * Samples a curve.
+     *
+     * @param breaks angles at which it may bend or step, rad, rising, in [0, 2π)
+     */
+    public static Trace of(Curve curve, double[] breaks) {
+        double[] grid = new double[STATIONS];
+        for (int i = 0; i < grid.length; i++) {
+            grid[i] = curve.at(i * (Angles.TURN / STATIONS), Approach.JUST_AFTER);
+        }
+        return new Trace(curve, grid, breaks);
+    }
+
     private int addBreak(int at, double angle, int passed) {
         int next = add(at, angle, curve.at(angle, Approach.JUST_BEFORE), passed);
         return add(next, angle, curve.at(angle, Approach.JUST_AFTER), passed + 1);
