@@ -236,7 +236,7 @@ class ArrowPictureTest {
         }
 
         private double mid(Mark line, int axis) {
-            return (line.points()[axis] + line.points()[axis + 2]) / 2;
+            return (line.points().get(axis) + line.points().get(axis + 2)) / 2;
         }
 
         @Test
@@ -268,7 +268,7 @@ class ArrowPictureTest {
                         newtons * d.picture().forceScale().pointsPerNewton(), bar.x(1) - bar.x(0), 1e-6, label.text());
                 double lead = newtons / Math.pow(10, Math.floor(Math.log10(newtons) + 1e-9));
                 assertTrue(List.of(1L, 2L, 5L).contains(Math.round(lead)), "1, 2 or 5: " + lead);
-                assertEquals(Math.round(lead), lead, 1e-9);
+                assertEquals(Math.rint(lead), lead, 1e-9);
             }
         }
     }

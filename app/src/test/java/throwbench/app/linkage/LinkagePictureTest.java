@@ -180,7 +180,7 @@ class LinkagePictureTest {
     }
 
     private static double middle(Mark m, int axis) {
-        return (m.points()[axis] + m.points()[axis + 2] + m.points()[axis + 4]) / 3;
+        return (m.points().get(axis) + m.points().get(axis + 2) + m.points().get(axis + 4)) / 3;
     }
 
     @Test
