@@ -65,7 +65,9 @@ public record Framing(double scale, double originX, double originY) {
             arrows(reach, layout.of(shown), peaks, scale, weight);
             Box room = size.room();
             double k = Math.min(reach.scale(true, room.width()), reach.scale(false, room.height()));
-            if (before.isPresent() && before.get().scale() > LARGE_ENOUGH * k && reach.inside(before.get(), room, SLACK * weight)) {
+            if (before.isPresent()
+                    && before.get().scale() > LARGE_ENOUGH * k
+                    && reach.inside(before.get(), room, SLACK * weight)) {
                 return before.get();
             }
             double midX = room.x() + room.width() / 2 - reach.middle(true, k);

@@ -223,6 +223,11 @@ public final class LinkageView extends Region implements View {
         return hoverLabel;
     }
 
+    /** The user's framing, drawn or not yet. */
+    Optional<Framing> framing() {
+        return ownFraming;
+    }
+
     /** Lets the user's framing go before the one that shows all. */
     void frame(Framing framing) {
         ownFraming = Optional.of(framing);

@@ -206,14 +206,12 @@ final class Pointing {
                                                 .value())
                                 .text(instant.pressure(own, chamber));
             }
-            case CRANK_PIN, CROSSHEAD_PIN ->
-                target.part().text() + "  "
-                        + value(
-                                Column.Kind.FORCE,
-                                Math.hypot(
-                                        instant.at(target.columns().get(0)),
-                                        instant.at(target.columns().get(1))),
-                                painted.peaks().greatestForce());
+            case CRANK_PIN, CROSSHEAD_PIN -> {
+                Column x = target.columns().get(0);
+                Column y = target.columns().get(1);
+                double force = Math.hypot(instant.at(x), instant.at(y));
+                yield target.part().text() + "  " + value(Column.Kind.FORCE, force, Math.hypot(peak(x), peak(y)));
+            }
             default -> {
                 Column column = target.columns().get(0);
                 yield target.part().text() + "  " + words(column) + " "

@@ -15,8 +15,7 @@ record Drawn(LinkagePicture picture, Instant instant, List<Mark> still, List<Mar
     }
 
     static Drawn of(Shown shown, LinkageChoice choice, double degrees, double width, double height) {
-        LinkagePicture picture =
-                new LinkagePicture(shown, Palette.LIGHT, choice, width, height, new RecordingPen());
+        LinkagePicture picture = new LinkagePicture(shown, Palette.LIGHT, choice, width, height, new RecordingPen());
         return at(picture, degrees);
     }
 

@@ -58,8 +58,11 @@ class LinkagePictureTest {
                     && m.greatest(0) <= box.x() + box.width()
                     && m.greatest(1) <= box.y() + box.height();
             if (!inside) {
-                assertEquals("inside " + box, m.kind() + " " + m.text() + " " + m.least(0) + ", " + m.least(1) + " … "
-                        + m.greatest(0) + ", " + m.greatest(1), where);
+                assertEquals(
+                        "inside " + box,
+                        m.kind() + " " + m.text() + " " + m.least(0) + ", " + m.least(1) + " … " + m.greatest(0) + ", "
+                                + m.greatest(1),
+                        where);
             }
         }
     }
@@ -177,7 +180,7 @@ class LinkagePictureTest {
     }
 
     private static double middle(Mark m, int axis) {
-        return (m.points()[axis] + m.points()[axis + 2] + m.points()[axis + 4]) / 3;
+        return (m.points().get(axis) + m.points().get(axis + 2) + m.points().get(axis + 4)) / 3;
     }
 
     @Test
@@ -229,9 +232,10 @@ class LinkagePictureTest {
             Shown shown = Machines.shown(machine, 0);
             double l = shown.shownThrow().linkage().rodLength();
             LinkagePicture picture = picture(machine, LinkageChoice.usual(), SIZES[2]);
-            double pin = MachineLayout.of(machine).of(0).gear().crank().pin() * picture.framing().scale();
-            double wrist =
-                    MachineLayout.of(machine).of(0).gear().rod().wristPin() * picture.framing().scale();
+            double pin = MachineLayout.of(machine).of(0).gear().crank().pin()
+                    * picture.framing().scale();
+            double wrist = MachineLayout.of(machine).of(0).gear().rod().wristPin()
+                    * picture.framing().scale();
             for (int degrees = 0; degrees < 360; degrees += 5) {
                 Drawn d = Drawn.at(picture, degrees);
                 Mark big = disc(d, pin);
@@ -259,7 +263,9 @@ class LinkagePictureTest {
                 Drawn d = Drawn.at(picture, degrees);
                 for (List<Mark> layer : List.of(d.still(), d.moving())) {
                     for (Mark m : layer) {
-                        if (m.kind().equals("area") || m.kind().equals("outline") || m.kind().equals("line")) {
+                        if (m.kind().equals("area")
+                                || m.kind().equals("outline")
+                                || m.kind().equals("line")) {
                             least = Math.min(least, m.least(0) - room.x());
                             least = Math.min(least, m.least(1) - room.y());
                         }

@@ -15,32 +15,33 @@ final class RecordingPen implements Pen {
     private static final double BOLD = 0.63;
 
     /** What was drawn; points in order, x and y in turn. */
-    record Mark(String kind, int stroke, double strokeWidth, int fill, double[] points, String text, double radius) {
+    record Mark(
+            String kind, int stroke, double strokeWidth, int fill, List<Double> points, String text, double radius) {
 
         double x(int i) {
-            return points[2 * i];
+            return points.get(2 * i);
         }
 
         double y(int i) {
-            return points[2 * i + 1];
+            return points.get(2 * i + 1);
         }
 
         int size() {
-            return points.length / 2;
+            return points.size() / 2;
         }
 
         double least(int axis) {
             double least = Double.POSITIVE_INFINITY;
-            for (int i = axis; i < points.length; i += 2) {
-                least = Math.min(least, points[i]);
+            for (int i = axis; i < points.size(); i += 2) {
+                least = Math.min(least, points.get(i));
             }
             return least - radius;
         }
 
         double greatest(int axis) {
             double most = Double.NEGATIVE_INFINITY;
-            for (int i = axis; i < points.length; i += 2) {
-                most = Math.max(most, points[i]);
+            for (int i = axis; i < points.size(); i += 2) {
+                most = Math.max(most, points.get(i));
             }
             return most + radius;
         }
@@ -62,7 +63,8 @@ final class RecordingPen implements Pen {
     }
 
     private void keep(String kind, double radius, String text, double... points) {
-        marks.add(new Mark(kind, strokeColour, strokeWidth, fillColour, points, text, radius));
+        List<Double> list = Arrays.stream(points).boxed().toList();
+        marks.add(new Mark(kind, strokeColour, strokeWidth, fillColour, list, text, radius));
     }
 
     @Override
@@ -162,7 +164,7 @@ final class RecordingPen implements Pen {
     @Override
     public String toString() {
         return marks.stream()
-                .map(m -> m.kind() + Arrays.toString(m.points()) + m.text())
+                .map(m -> m.kind() + m.points() + m.text())
                 .toList()
                 .toString();
     }
