@@ -4,14 +4,10 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import javafx.scene.AccessibleRole;
-import javafx.scene.Cursor;
 import javafx.scene.canvas.Canvas;
 import javafx.scene.control.Label;
-import javafx.scene.control.TextInputControl;
 import javafx.scene.input.KeyEvent;
-import javafx.scene.input.MouseEvent;
 import javafx.scene.layout.Region;
 import org.jspecify.annotations.Nullable;
 import throwbench.app.bench.Playhead;
@@ -21,12 +17,10 @@ import throwbench.app.drawing.FxPen;
 import throwbench.app.drawing.Palette;
 import throwbench.app.drawing.PaletteStyle;
 import throwbench.app.drawing.Readout;
-import throwbench.app.drawing.Signal;
 import throwbench.app.drawing.View;
 import throwbench.solver.mechanism.Angles;
 import throwbench.solver.revolution.Column;
 import throwbench.solver.revolution.Instant;
-import throwbench.solver.revolution.RunningThrow;
 
 /**
  * The revolution strip on the screen. Three layers: what stands still, the present values, the cursor; a moving crank only
@@ -34,14 +28,8 @@ import throwbench.solver.revolution.RunningThrow;
  */
 public final class StripView extends Region implements View {
 
-    /** Scrubbing by mouse goes to tenths of a degree: what is shown is then exactly where the crank stands. */
-    private static final double TENTHS = 10;
-
-    /** Points from an event's mark within which the mouse is on it. */
-    private static final double NEAR = 4;
-
     /** Width of the button from which traces are added. */
-    private static final double MENU = 30;
+    private static final double MENU = 26;
 
     private final Playhead playhead;
     private final Canvas still = new Canvas();
@@ -53,6 +41,7 @@ public final class StripView extends Region implements View {
     private final Region focusFrame = new Region();
     private final Label hint = new Label();
     private final ColumnMenu menu;
+    private final StripHands hands;
     private final PlaceField place;
     private final StripPainter painter = new StripPainter();
     private final CursorPainter cursorPainter = new CursorPainter();
@@ -63,19 +52,11 @@ public final class StripView extends Region implements View {
     private boolean stale = true;
     private double drawnAngle = Double.NaN;
     private long stillDrawings;
-    private boolean scrubbing;
 
     public StripView(Playhead playhead) {
         this.playhead = playhead;
-        this.place = new PlaceField(
-                text -> {
-                    Shown now = shown.orElseThrow();
-                    RunningThrow running = now.running().throwsInOrder().get(now.throwIndex());
-                    return TypedPlace.read(
-                            text, running.body().linkage(), now.running().rotation(), now.units());
-                },
-                this::stopAt,
-                this::requestFocus);
+        this.hands = new StripHands(this, playhead, hint);
+        this.place = new PlaceField(this::read, hands::stopAt, this::requestFocus);
         this.menu = new ColumnMenu("Add traces or take them off", Lanes.ADDABLE, this::isAdded, this::trace);
         setId("revolution-strip");
         getStyleClass().add("revolution-strip");
@@ -85,11 +66,6 @@ public final class StripView extends Region implements View {
         focusFrame.getStyleClass().add("strip-focus");
         focusFrame.visibleProperty().bind(focusVisibleProperty());
         focusFrame.setMouseTransparent(true);
-        hint.setId("strip-hint");
-        hint.getStyleClass().add("strip-message");
-        hint.setMouseTransparent(true);
-        hint.setManaged(false);
-        hint.setVisible(false);
         getChildren().addAll(still, values, cursor, focusFrame, hint, menu, place);
         setFocusTraversable(true);
         setAccessibleRole(AccessibleRole.SLIDER);
@@ -99,12 +75,6 @@ public final class StripView extends Region implements View {
                         + " centres, N and B to the next event and the one before.");
         setMinSize(420, 180);
         setPrefSize(900, 330);
-        setOnMousePressed(this::press);
-        setOnMouseDragged(this::drag);
-        setOnMouseReleased(e -> scrubbing = false);
-        setOnMouseMoved(this::hover);
-        setOnMouseExited(e -> hint.setVisible(false));
-        setOnKeyPressed(this::scrub);
         wear(palette);
     }
 
@@ -150,6 +120,25 @@ public final class StripView extends Region implements View {
     /** The columns that were added, in that order. */
     public List<Column> addedTraces() {
         return List.copyOf(added);
+    }
+
+    /**
+     * Turns the crank by a key, wherever in the window it was pressed; a key that belongs to a text or turns nothing is left
+     * alone.
+     */
+    public void scrub(KeyEvent event) {
+        hands.key(event);
+    }
+
+    private TypedPlace read(String text) {
+        Shown now = shown.orElseThrow();
+        return TypedPlace.read(text, now.shownThrow().linkage(), now.running().rotation(), now.units());
+    }
+
+    /** What was drawn last. */
+    @Nullable
+    StripPlot plot() {
+        return plot;
     }
 
     /** Puts the keyboard into the field for an angle or a travel. */
@@ -245,91 +234,5 @@ public final class StripView extends Region implements View {
     protected void setHeight(double height) {
         stale |= height != getHeight();
         super.setHeight(height);
-    }
-
-    private boolean inPlot(MouseEvent event) {
-        StripPlot drawn = plot;
-        return drawn != null
-                && event.getX() >= drawn.layout().left() - 10
-                && event.getX() <= drawn.layout().right() + 10;
-    }
-
-    private Optional<Column> removable(MouseEvent event) {
-        StripPlot drawn = plot;
-        return drawn == null
-                ? Optional.empty()
-                : LegendPainter.removable(drawn, event.getX(), event.getY())
-                        .map(StripTrace::signal)
-                        .filter(Signal.OfColumn.class::isInstance)
-                        .map(s -> ((Signal.OfColumn) s).column());
-    }
-
-    /** Names what stands under the mouse: the events at its angle, or what a click would take off. */
-    private void hover(MouseEvent event) {
-        StripPlot drawn = plot;
-        boolean plotted = inPlot(event);
-        boolean removes = removable(event).isPresent();
-        setCursor(plotted ? Cursor.H_RESIZE : removes ? Cursor.HAND : Cursor.DEFAULT);
-        String words = removes
-                ? "click: take this trace off"
-                : plotted && drawn != null ? drawn.eventsAt(event.getX(), NEAR) : "";
-        hint.setText(words);
-        hint.setVisible(!words.isEmpty());
-        if (!words.isEmpty()) {
-            hint.autosize();
-            double x = Math.min(event.getX() + 14, getWidth() - hint.getWidth() - 4);
-            double y = event.getY() + 18 + hint.getHeight() > getHeight()
-                    ? event.getY() - hint.getHeight() - 8
-                    : event.getY() + 18;
-            hint.relocate(x, y);
-        }
-    }
-
-    private void press(MouseEvent event) {
-        requestFocus();
-        removable(event).ifPresent(this::removeTrace);
-        scrubbing = inPlot(event);
-        drag(event);
-    }
-
-    private void drag(MouseEvent event) {
-        StripPlot drawn = plot;
-        if (scrubbing && drawn != null) {
-            double degrees = Math.toDegrees(drawn.layout().angle(event.getX()));
-            stopAt(Math.toRadians(Math.rint(degrees * TENTHS) / TENTHS));
-            event.consume();
-        }
-    }
-
-    /**
-     * Turns the crank by a key, wherever in the window it was pressed; a key that belongs to a text or turns nothing is left
-     * alone.
-     */
-    public void scrub(KeyEvent event) {
-        StripPlot drawn = plot;
-        if (event.getTarget() instanceof TextInputControl || event.isAltDown() || drawn == null) {
-            return;
-        }
-        RunningThrow running =
-                drawn.shown().running().throwsInOrder().get(drawn.shown().throwIndex());
-        OptionalDouble turned = ScrubKeys.after(
-                event.getCode(),
-                event.isShiftDown(),
-                event.isShortcutDown() || event.isControlDown(),
-                playhead.crankAngle().get(),
-                running.body()
-                        .linkage()
-                        .crankEndDeadCentre(drawn.shown().running().rotation()),
-                drawn.events());
-        if (turned.isPresent()) {
-            stopAt(turned.getAsDouble());
-            event.consume();
-        }
-    }
-
-    /** Who scrubs wants to look: the crank stops where it was put. */
-    private void stopAt(double angle) {
-        playhead.setPlaying(false);
-        playhead.turnTo(angle);
     }
 }
