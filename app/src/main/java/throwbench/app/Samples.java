@@ -7,7 +7,6 @@ import java.nio.charset.StandardCharsets;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.Reading;
 import throwbench.solver.document.attached.AttachedFiles;
-import throwbench.solver.document.check.GasNames;
 
 /** Sample machines that come inside the program, so that it opens one from any folder. */
 public final class Samples {
@@ -31,6 +30,6 @@ public final class Samples {
 
     /** Reads a sample that names no other files. */
     public static Reading read(String name) {
-        return MachineDocument.read(text(name), AttachedFiles.NONE, GasNames.TABLE);
+        return MachineDocument.read(text(name), AttachedFiles.NONE);
     }
 }

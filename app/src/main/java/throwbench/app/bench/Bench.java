@@ -12,7 +12,6 @@ import throwbench.solver.document.Fault;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.MachineFile;
 import throwbench.solver.document.Reading;
-import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.finding.Finding;
 import throwbench.solver.machine.Machine;
@@ -98,7 +97,15 @@ public final class Bench {
      * @return what is wrong with it; empty when it was taken
      */
     public List<Fault> edit(String path, String text, String name, boolean joins) {
-        MachineDocument next = document().with(document().path(path), text);
+        return change(document().with(document().path(path), text), name, path, joins);
+    }
+
+    /** Takes a value out of the file, so that its default holds; what is wrong with that is returned. */
+    public List<Fault> leaveOut(String path, String name) {
+        return change(document().without(document().path(path)), name, path, false);
+    }
+
+    private List<Fault> change(MachineDocument next, String name, String path, boolean joins) {
         if (next.equals(document())) {
             return List.of();
         }
@@ -111,7 +118,7 @@ public final class Bench {
     }
 
     private List<Fault> take(MachineDocument next) {
-        Reading reading = next.read(file.get().attached(), GasNames.TABLE);
+        Reading reading = next.read(file.get().attached());
         if (reading.machine().isEmpty()) {
             return reading.faults();
         }

@@ -4,15 +4,12 @@ import java.util.List;
 import java.util.Optional;
 import throwbench.app.bench.Bench;
 import throwbench.solver.document.Fault;
+import throwbench.solver.document.KeyPath;
 import throwbench.solver.document.MachineDocument;
+import throwbench.solver.document.TypedInput;
 import throwbench.solver.document.quantity.Dimension;
-import throwbench.solver.document.quantity.PressureMark;
 import throwbench.solver.document.quantity.Quantity;
-import throwbench.solver.document.quantity.QuantityReading;
-import throwbench.solver.document.quantity.QuantityText;
 import throwbench.solver.document.quantity.Refusal;
-import throwbench.solver.document.quantity.TypedValue;
-import throwbench.solver.document.quantity.Unit;
 import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.document.schema.Key;
 
@@ -33,9 +30,16 @@ final class FieldInput {
         return entry;
     }
 
+    private MachineDocument document() {
+        return bench.document();
+    }
+
+    private KeyPath path() {
+        return document().path(entry.path());
+    }
+
     private Optional<Key> key() {
-        MachineDocument document = bench.document();
-        return document.key(document.path(entry.path()));
+        return document().key(path());
     }
 
     /** One sentence for a tooltip. */
@@ -45,8 +49,7 @@ final class FieldInput {
 
     /** The user's own text, or nothing where the file leaves the value out. */
     String text() {
-        MachineDocument document = bench.document();
-        return document.valueText(document.path(entry.path())).orElse("");
+        return document().valueText(path()).orElse("");
     }
 
     /** What a missing value stands for; empty where it must be there. */
@@ -54,64 +57,39 @@ final class FieldInput {
         return key().map(Key::otherwise).orElse("");
     }
 
-    private Dimension dimension() {
-        // a clearance is a share unless it is written as a volume
-        return key().flatMap(Key::dimension)
-                .orElse(text().endsWith("%") || text().isEmpty() ? Dimension.SHARE : clearanceDimension());
-    }
-
-    private Dimension clearanceDimension() {
-        QuantityReading asVolume =
-                QuantityText.read(text(), Dimension.VOLUME, bench.document().ambientPressure());
-        return asVolume instanceof Quantity ? Dimension.VOLUME : Dimension.SHARE;
-    }
-
-    /** What the field holds now. */
-    Optional<Quantity> present() {
-        String text = text().isEmpty() ? otherwise() : text();
-        QuantityReading reading =
-                QuantityText.read(text, dimension(), bench.document().ambientPressure());
-        return reading instanceof Quantity quantity ? Optional.of(quantity) : Optional.empty();
-    }
-
     /** The same value in the other system of units; empty where it would read the same. */
     String beside() {
-        Optional<Quantity> present = present();
-        if (present.isEmpty() || dimension().isDimensionless()) {
+        Optional<Quantity> present = document().quantity(path());
+        Optional<Dimension> dimension = key().flatMap(Key::dimension);
+        if (present.isEmpty() || dimension.isEmpty() || dimension.get().isDimensionless()) {
             return "";
         }
         Quantity quantity = present.get();
-        Unit unit = quantity.unit();
-        boolean american = UnitSystem.US.unit(dimension()) == unit;
+        boolean american = UnitSystem.US.unit(dimension.get()) == quantity.unit();
         UnitSystem other = american ? UnitSystem.SI : UnitSystem.US;
-        if (other.unit(dimension()) == unit) {
-            return "";
-        }
-        PressureMark mark = quantity.mark();
-        return other.show(quantity.value(), dimension(), mark, bench.document().ambientPressure(), DIGITS_BESIDE);
+        return other.unit(dimension.get()) == quantity.unit()
+                ? ""
+                : other.show(
+                        quantity.value(),
+                        dimension.get(),
+                        quantity.mark(),
+                        document().ambientPressure(),
+                        DIGITS_BESIDE);
     }
 
     /**
-     * Takes a typed text into the machine.
+     * Takes a typed text into the machine; an empty one takes an optional value out of the file.
      *
      * @return what is wrong, in a sentence; empty when it was taken
      */
     String commit(String typed) {
         if (typed.isBlank()) {
-            return text().isEmpty() ? "" : "empty; a value is wanted, such as " + text();
+            return text().isEmpty() ? "" : told(bench.leaveOut(entry.path(), entry.label() + " left out"));
         }
-        QuantityReading reading =
-                TypedValue.read(typed, dimension(), present(), bench.document().ambientPressure());
-        if (dimension() == Dimension.SHARE
-                && reading instanceof Refusal
-                && key().flatMap(Key::dimension).isEmpty()) {
-            reading = TypedValue.read(
-                    typed, Dimension.VOLUME, Optional.empty(), bench.document().ambientPressure());
-        }
-        if (reading instanceof Refusal refusal) {
-            return refusal.sentence();
-        }
-        return reading instanceof Quantity quantity ? put(quantity.text(), false) : "";
+        TypedInput input = document().typed(path(), typed);
+        return input.refusal()
+                .map(Refusal::sentence)
+                .orElseGet(() -> put(input.text().orElseThrow(), false));
     }
 
     /**
@@ -120,17 +98,17 @@ final class FieldInput {
      * @return what is wrong, in a sentence; empty when it was taken
      */
     String step(double steps) {
-        Optional<Quantity> present = present();
+        Optional<Quantity> present = document().quantity(path());
         if (present.isEmpty()) {
             return "";
         }
         Quantity quantity = present.get();
         double place = Steps.lastPlace(quantity.text());
-        double zero = quantity.mark().zero(bench.document().ambientPressure());
+        double zero = quantity.mark().zero(document().ambientPressure());
         double shown = quantity.unit().fromSi(quantity.value() - zero) + steps * place;
         double rounded = Math.rint(shown / place) * place;
         String text = quantity.rewritten(
-                quantity.unit().toSi(rounded) + zero, bench.document().ambientPressure(), Steps.DIGITS);
+                quantity.unit().toSi(rounded) + zero, document().ambientPressure(), Steps.DIGITS);
         return put(text, true);
     }
 
@@ -149,7 +127,11 @@ final class FieldInput {
             return "";
         }
         String name = entry.label() + (before.isEmpty() ? " " : " " + before + " → ") + text;
-        List<Fault> faults = bench.edit(entry.path(), text, name, live);
+        return told(bench.edit(entry.path(), text, name, live));
+    }
+
+    /** The fault of this place, or else the first one. */
+    private String told(List<Fault> faults) {
         return faults.stream()
                 .filter(f -> f.path().equals(entry.path()))
                 .findFirst()

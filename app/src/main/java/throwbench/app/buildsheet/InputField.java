@@ -17,6 +17,9 @@ import javafx.scene.layout.VBox;
  */
 final class InputField extends VBox {
 
+    private static final double FIELD_WIDTH = 92;
+    private static final double BESIDE_WIDTH = 76;
+
     private final FieldInput input;
     private final TextField field = new TextField();
     private final Label beside = new Label();
@@ -29,18 +32,18 @@ final class InputField extends VBox {
         name.setText(input.entry().label());
         name.getStyleClass().add("name");
         name.setLabelFor(field);
-        name.setMinWidth(60);
+        name.setMinWidth(92);
         name.setMaxWidth(Double.MAX_VALUE);
         HBox.setHgrow(name, Priority.ALWAYS);
         field.setId(path);
-        field.setPrefWidth(104);
-        field.setMinWidth(104);
-        field.setMaxWidth(104);
+        field.setPrefWidth(FIELD_WIDTH);
+        field.setMinWidth(FIELD_WIDTH);
+        field.setMaxWidth(FIELD_WIDTH);
         field.setAccessibleText(input.entry().label());
         field.setTooltip(new Tooltip(input.meaning() + "\n" + path));
         beside.getStyleClass().add("other");
-        beside.setMinWidth(74);
-        beside.setPrefWidth(74);
+        beside.setMinWidth(BESIDE_WIDTH);
+        beside.setPrefWidth(BESIDE_WIDTH);
         wrong.getStyleClass().add("wrong");
         wrong.setId(path + "-wrong");
         HBox row = new HBox(6, name, field, beside);
@@ -71,7 +74,9 @@ final class InputField extends VBox {
             double sense = event.getCode() == KeyCode.UP ? 1 : -1;
             step(event.isShiftDown() ? 10 * sense : sense);
             event.consume();
-        } else if (event.isShortcutDown() && event.getCode() == KeyCode.Z && field.getText().equals(lastShown)) {
+        } else if (event.isShortcutDown()
+                && event.getCode() == KeyCode.Z
+                && field.getText().equals(lastShown)) {
             // nothing typed that the field's own undo could take back: the machine's is meant
             input.undo(event.isShiftDown());
             event.consume();

@@ -1,15 +1,17 @@
 package throwbench.app.gauge;
 
-import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
+import java.util.Set;
 import javafx.scene.canvas.Canvas;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.Pane;
 import javafx.scene.layout.Region;
 import org.jspecify.annotations.Nullable;
 import throwbench.app.bench.Shown;
+import throwbench.app.drawing.ColumnMenu;
 import throwbench.app.drawing.FxPen;
 import throwbench.app.drawing.Palette;
 import throwbench.app.drawing.PaletteStyle;
@@ -23,6 +25,7 @@ import throwbench.solver.revolution.Instant;
 public final class GaugeColumn extends Region implements View {
 
     private static final double SCROLL_BAR = 14;
+    private static final double MENU = 30;
 
     private final Canvas still = new Canvas();
     private final Canvas moving = new Canvas();
@@ -31,7 +34,9 @@ public final class GaugeColumn extends Region implements View {
     private final Pane face = new Pane(still, moving);
     private final ScrollPane scroll = new ScrollPane(face);
     private final GaugePainter painter = new GaugePainter();
-    private final List<Column> added = new ArrayList<>();
+    private final Set<Column> picked = EnumSet.copyOf(Gauges.USUAL);
+    private final ColumnMenu menu =
+            new ColumnMenu("Choose gauges", Gauges.ALL, picked::contains, (column, on) -> pick(column, on));
     private Optional<Shown> shown = Optional.empty();
     private Palette palette = Palette.LIGHT;
     private List<Gauge> gauges = List.of();
@@ -49,7 +54,7 @@ public final class GaugeColumn extends Region implements View {
         scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
         scroll.setFitToWidth(true);
         scroll.setAccessibleText("Present values at this crank angle");
-        getChildren().add(scroll);
+        getChildren().addAll(scroll, menu);
         setMinSize(210, 120);
         setPrefSize(320, 340);
         wear(palette);
@@ -68,20 +73,12 @@ public final class GaugeColumn extends Region implements View {
         setStyle(PaletteStyle.of(next));
     }
 
-    /** Adds a gauge for a column; one that is there already stays as it is. */
-    public void addGauge(Column column) {
+    /** Gives a column a gauge or takes its gauge away; chamber pressures always have theirs. */
+    public void pick(Column column, boolean on) {
         if (column == Column.CRANK_ANGLE) {
             throw new IllegalArgumentException("the crank angle has no extremes and no gauge");
         }
-        if (!added.contains(column)) {
-            added.add(column);
-            stale = true;
-        }
-    }
-
-    /** Takes off a gauge that was added. */
-    public void removeGauge(Column column) {
-        stale |= added.remove(column);
+        stale |= on ? picked.add(column) : picked.remove(column);
     }
 
     @Override
@@ -108,13 +105,7 @@ public final class GaugeColumn extends Region implements View {
 
     private void drawStill(Shown state) {
         stillDrawings++;
-        List<Signal> signals = Gauges.usual(state.shownThrow());
-        for (Column column : added) {
-            Signal signal = new Signal.OfColumn(column);
-            if (!signals.contains(signal)) {
-                signals.add(signal);
-            }
-        }
+        List<Signal> signals = Gauges.of(state.shownThrow(), picked);
         gauges = signals.stream().map(s -> Gauge.of(s, state)).toList();
         GaugeLayout fitted = GaugeLayout.of(getWidth(), getHeight(), gauges.size());
         boolean scrolls = fitted.height() > getHeight();
@@ -133,6 +124,7 @@ public final class GaugeColumn extends Region implements View {
     @Override
     protected void layoutChildren() {
         scroll.resizeRelocate(0, 0, getWidth(), getHeight());
+        menu.resizeRelocate(getWidth() - MENU - SCROLL_BAR, 7, MENU, 21);
     }
 
     @Override

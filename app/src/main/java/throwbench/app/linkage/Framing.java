@@ -1,10 +1,12 @@
 package throwbench.app.linkage;
 
+import java.util.Optional;
 import throwbench.app.linkage.force.ArrowSet;
 import throwbench.app.linkage.force.ForceKind;
 import throwbench.app.linkage.force.ForcePeaks;
 import throwbench.app.linkage.force.ForceScale;
 import throwbench.app.linkage.force.LabelPlacer.Box;
+import throwbench.app.linkage.parts.ThrowAxes;
 import throwbench.app.linkage.parts.ThrowLayout;
 
 /**
@@ -26,34 +28,52 @@ public record Framing(double scale, double originX, double originY) {
     }
 
     /**
-     * The largest framing in which the whole machine at every angle, its arrows and its dead-centre marks stay inside a
-     * rectangle, in its middle.
+     * Finds the framing of a whole machine.
+     *
+     * @param alone whether the other throws are left out
      */
-    static Framing fit(
-            MachineLayout layout,
-            int shown,
-            boolean alone,
-            ForcePeaks peaks,
-            ForceScale scale,
-            Box room,
-            double weight) {
-        Reach reach = new Reach();
-        for (int i = 0; i < layout.size(); i++) {
-            if (i == shown || !alone) {
-                reach.direction(layout.directions().get(i));
-                ThrowLayout.Extent e = layout.of(i).extent();
-                reach.add(e.leastX(), e.leastY(), 0, 0);
-                reach.add(e.greatestX(), e.leastY(), 0, i == shown ? -StillPainter.MARK * weight : 0);
-                reach.add(e.leastX(), e.greatestY(), 0, 0);
-                reach.add(e.greatestX(), e.greatestY(), 0, 0);
+    record Fit(MachineLayout layout, int shown, boolean alone, PictureSize size) {
+
+        /** A framing stays while it is at least so large as a share of the largest one, and everything is inside. */
+        private static final double LARGE_ENOUGH = 0.93;
+
+        /** How far into the border it may reach then, points at weight 1. */
+        private static final double SLACK = 6;
+
+        /**
+         * The largest framing in which the machine at every angle, its arrows and its dead-centre marks stay inside the
+         * room, in its middle.
+         *
+         * @param before the framing that held until now: it stays where it still serves
+         */
+        Framing of(ForcePeaks peaks, ForceScale scale, Optional<Framing> before) {
+            double weight = size.weight();
+            Reach reach = new Reach();
+            for (int i = 0; i < layout.size(); i++) {
+                if (i == shown || !alone) {
+                    reach.direction(layout.directions().get(i));
+                    ThrowLayout.Extent e = layout.of(i).extent();
+                    double mark = i == shown ? StillPainter.MARK * weight : 0;
+                    boolean below = ThrowAxes.upper(layout.directions().get(i)) > 0;
+                    reach.add(e.leastX(), e.leastY(), 0, 0);
+                    reach.add(e.greatestX(), e.leastY(), 0, below ? -mark : 0);
+                    reach.add(e.leastX(), e.greatestY(), 0, 0);
+                    reach.add(e.greatestX(), e.greatestY(), 0, below ? 0 : mark);
+                }
             }
+            reach.direction(layout.directions().get(shown));
+            arrows(reach, layout.of(shown), peaks, scale, weight);
+            Box room = size.room();
+            double k = Math.min(reach.scale(true, room.width()), reach.scale(false, room.height()));
+            if (before.isPresent()
+                    && before.get().scale() > LARGE_ENOUGH * k
+                    && reach.inside(before.get(), room, SLACK * weight)) {
+                return before.get();
+            }
+            double midX = room.x() + room.width() / 2 - reach.middle(true, k);
+            double midY = room.y() + room.height() / 2 + reach.middle(false, k);
+            return new Framing(k, midX, midY);
         }
-        reach.direction(layout.directions().get(shown));
-        arrows(reach, layout.of(shown), peaks, scale, weight);
-        double k = Math.min(reach.scale(true, room.width()), reach.scale(false, room.height()));
-        double midX = room.x() + room.width() / 2 - reach.middle(true, k);
-        double midY = room.y() + room.height() / 2 + reach.middle(false, k);
-        return new Framing(k, midX, midY);
     }
 
     private static void arrows(Reach reach, ThrowLayout layout, ForcePeaks peaks, ForceScale scale, double weight) {
@@ -67,7 +87,7 @@ public record Framing(double scale, double originX, double originY) {
                 if (arrows.arrows().get(i).kind() == ForceKind.TORQUE) {
                     double most = Math.abs(peaks.forceX(look, i)) * scale.radPerNewtonMetre();
                     for (int side = -1; side <= 1; side++) {
-                        double at = ArrowSet.ARC_START + side * most;
+                        double at = arrows.arcStart() + side * most;
                         double out = (MovingPainter.ARC_OUT + 8) * weight;
                         reach.add(sweep * Math.cos(at), sweep * Math.sin(at), out * Math.cos(at), out * Math.sin(at));
                     }
@@ -124,6 +144,14 @@ public record Framing(double scale, double originX, double originY) {
                 }
             }
             return Math.max(least, 1);
+        }
+
+        boolean inside(Framing f, Box room, double slack) {
+            double k = f.scale();
+            return f.originX() + end(true, k, 1) <= room.x() + room.width() + slack
+                    && f.originX() - end(true, k, -1) >= room.x() - slack
+                    && f.originY() + end(false, k, -1) <= room.y() + room.height() + slack
+                    && f.originY() - end(false, k, 1) >= room.y() - slack;
         }
 
         double middle(boolean alongX, double k) {

@@ -37,7 +37,8 @@ final class Headline {
     private final double gap;
     private final Box box;
 
-    Headline(Scene scene, Pen pen) {
+    /** @param end x before which it ends, points */
+    Headline(Scene scene, Pen pen, double end) {
         this.scene = scene;
         this.peak = greatest(scene.shown().summary().reversal());
         Readout readout = Readout.of(scene.shown().units(), Column.Kind.FORCE, peak);
@@ -45,7 +46,7 @@ final class Headline {
         this.unit = readout.unit();
         double wanted = SIZE * scene.weight();
         double left = scene.size().border();
-        double free = scene.size().width() - 2 * left;
+        double free = end - left;
         double full = total(pen, wanted, readout);
         // in a narrow view the headline shrinks rather than leave it
         this.size = full > free ? Math.floor(2 * wanted * free / full) / 2 : wanted;
@@ -59,7 +60,9 @@ final class Headline {
         numberWidth = pen.width(readout.number(peak));
         degreeWidth = pen.width("°");
         double right = wordsLeft + compressionWidth + numberWidth + 2 * gap + pen.width(unit);
-        box = new Box(left, 10 * scene.weight(), right - left, 1.5 * size);
+        // on whole points: the headline is a layer of its own, and letters between points blur
+        box = new Box(
+                Math.floor(left), Math.floor(10 * scene.weight()), Math.ceil(right - left) + 1, Math.ceil(1.5 * size));
     }
 
     private static double total(Pen pen, double size, Readout readout) {

@@ -28,6 +28,9 @@ record LabelPlan(List<Optional<Label>> arrows, List<ChamberLabel> chambers, Box 
     /** Size of type beside arrows, points at weight 1. */
     static final double TYPE = 12.5;
 
+    /** Side of a cell of the occupancy, points at weight 1. */
+    private static final double CELL = 5;
+
     /**
      * A chamber's pressure: written inside while the chamber is long enough, else beside the cylinder.
      *
@@ -42,8 +45,10 @@ record LabelPlan(List<Optional<Label>> arrows, List<ChamberLabel> chambers, Box 
             double rootX,
             double rootY) {}
 
-    static LabelPlan of(Scene scene, ForcePeaks peaks, ForceScale scale, Pen pen, List<Box> taken) {
-        return new Maker(scene, peaks, scale, pen, taken).make();
+    /** @param before the plan that held until now: labels stay where they can */
+    static LabelPlan of(
+            Scene scene, ForcePeaks peaks, ForceScale scale, Pen pen, List<Box> taken, Optional<LabelPlan> before) {
+        return new Maker(scene, peaks, scale, pen, taken, before).make();
     }
 
     private static final class Maker {
@@ -56,8 +61,10 @@ record LabelPlan(List<Optional<Label>> arrows, List<ChamberLabel> chambers, Box 
         private final Survey survey;
         private final LabelPlacer placer;
         private final ArrowSet arrows;
+        private final Optional<LabelPlan> before;
 
-        Maker(Scene scene, ForcePeaks peaks, ForceScale scale, Pen pen, List<Box> taken) {
+        Maker(Scene scene, ForcePeaks peaks, ForceScale scale, Pen pen, List<Box> taken, Optional<LabelPlan> before) {
+            this.before = before;
             this.scene = scene;
             this.peaks = peaks;
             this.pen = pen;
@@ -65,7 +72,7 @@ record LabelPlan(List<Optional<Label>> arrows, List<ChamberLabel> chambers, Box 
             this.w = scene.weight();
             this.arrows = peaks.arrows();
             Occupancy occupancy =
-                    new Occupancy(scene.size().width(), scene.size().height());
+                    new Occupancy(scene.size().width(), scene.size().height(), CELL * Math.max(1, scene.weight()));
             this.survey = new Survey(scene, peaks, scale, occupancy);
             survey.mark();
             this.placer = new LabelPlacer(occupancy, scene.size().inside(), 5 * w, w);
@@ -102,8 +109,25 @@ record LabelPlan(List<Optional<Label>> arrows, List<ChamberLabel> chambers, Box 
                             survey.nearX(i),
                             survey.nearY(i),
                             label.box().width(),
-                            label.box().height())
+                            label.box().height(),
+                            stoodAt(a.name()))
                     .map(label::at);
+        }
+
+        private Optional<Box> stoodAt(String name) {
+            return before.flatMap(plan -> plan.arrows().stream()
+                    .flatMap(Optional::stream)
+                    .filter(l -> l.name().equals(name))
+                    .map(Label::box)
+                    .findFirst());
+        }
+
+        private Optional<Box> stoodAt(ChamberSpace space) {
+            return before.flatMap(plan -> plan.chambers().stream()
+                    .filter(c -> c.space().chamber() == space.chamber())
+                    .flatMap(c -> c.beside().stream())
+                    .map(Label::box)
+                    .findFirst());
         }
 
         /** The place inside, beside the cover, in the half of the cylinder that the gas arrows leave free. */
@@ -120,7 +144,7 @@ record LabelPlan(List<Optional<Label>> arrows, List<ChamberLabel> chambers, Box 
             double height = (space.radius() - (space.plunger() ? space.radius() : space.inner())) * axes.scale();
             int outwards = space.head() ? -1 : 1;
             double x = space.cover() + outwards * needed / 2;
-            double y = scene.own().linkage().guideOffset() + space.upper();
+            double y = scene.own().linkage().guideOffset() + axes.upper() * space.upper();
             double rootX = axes.px(
                     space.cover()
                             + outwards
@@ -129,8 +153,9 @@ record LabelPlan(List<Optional<Label>> arrows, List<ChamberLabel> chambers, Box 
                                             space.head()
                                                     ? scene.own().linkage().greatestReach()
                                                     : scene.own().linkage().leastReach()),
-                    scene.own().linkage().guideOffset() + 0.86 * space.radius());
-            double rootY = axes.py(space.cover(), scene.own().linkage().guideOffset() + 0.86 * space.radius());
+                    scene.own().linkage().guideOffset() + axes.upper() * 0.86 * space.radius());
+            double rootY =
+                    axes.py(space.cover(), scene.own().linkage().guideOffset() + axes.upper() * 0.86 * space.radius());
             boolean fits = 0.75 * space.free(reach) > needed && height > across + 6 * w;
             if (!fits) {
                 return new ChamberLabel(space, Optional.empty(), needed, Optional.empty(), rootX, rootY);
@@ -153,12 +178,14 @@ record LabelPlan(List<Optional<Label>> arrows, List<ChamberLabel> chambers, Box 
 
         private ChamberLabel beside(ChamberLabel c, Readout pressure) {
             Label label = Label.measured(pen, "", pressure, pressure(), 11.5 * w);
-            double out = scene.own().linkage().guideOffset() + c.space().radius() + (22 * w) / axes.scale();
+            double out = scene.own().linkage().guideOffset()
+                    + axes.upper() * (c.space().radius() + (22 * w) / axes.scale());
             Optional<Label> placed = placer.place(
                             axes.px(c.space().cover(), out),
                             axes.py(c.space().cover(), out),
                             label.box().width(),
-                            label.box().height())
+                            label.box().height(),
+                            stoodAt(c.space()))
                     .map(label::at);
             return new ChamberLabel(c.space(), c.inside(), c.needed(), placed, c.rootX(), c.rootY());
         }

@@ -67,7 +67,8 @@ final class LinkageHands {
     private void press(MouseEvent e) {
         view.requestFocus();
         Optional<LinkagePicture> picture = view.picture();
-        if (picture.isEmpty() || e.getButton() != MouseButton.PRIMARY && e.getButton() != MouseButton.MIDDLE) {
+        boolean held = e.getButton() == MouseButton.PRIMARY || e.getButton() == MouseButton.MIDDLE;
+        if (picture.isEmpty() || !held) {
             return;
         }
         MovingPainter painted = picture.get().moving();
@@ -201,7 +202,8 @@ final class LinkageHands {
 
     private void zoom(ScrollEvent e) {
         view.picture().ifPresent(picture -> {
-            Framing now = picture.framing();
+            // several turns of the wheel may come within one frame
+            Framing now = view.framing().orElse(picture.framing());
             double scale = Math.max(LEAST_ZOOM, Math.min(MOST_ZOOM, now.scale() * Math.pow(ZOOM_STEP, e.getDeltaY())));
             view.frame(now.zoomed(scale / now.scale(), e.getX(), e.getY()));
         });

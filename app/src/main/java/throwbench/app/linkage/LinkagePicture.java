@@ -32,34 +32,50 @@ public final class LinkagePicture {
     private final Box movingBox;
 
     /**
-     * Settles a picture.
+     * How a picture follows on another.
+     *
+     * @param framing where the machine stands; empty: the whole machine in the middle
+     * @param before the picture that held until now: what can stay where it is stays there
+     * @param held a design drawn as a ghost under the present one
+     */
+    record Standing(Optional<Framing> framing, Optional<LinkagePicture> before, Optional<Shown> held) {
+
+        static final Standing ALONE = new Standing(Optional.empty(), Optional.empty(), Optional.empty());
+    }
+
+    /**
+     * Settles a picture of the whole machine.
      *
      * @param pen measures texts
-     * @param framing where the machine stands; empty: the whole machine in the middle
      */
-    public LinkagePicture(
-            Shown shown,
-            Palette palette,
-            LinkageChoice choice,
-            double width,
-            double height,
-            Pen pen,
-            Optional<Framing> framing) {
+    public LinkagePicture(Shown shown, Palette palette, LinkageChoice choice, double width, double height, Pen pen) {
+        this(shown, palette, choice, PictureSize.of(width, height, choice.typeScale()), pen, Standing.ALONE);
+    }
+
+    LinkagePicture(Shown shown, Palette palette, LinkageChoice choice, PictureSize size, Pen pen, Standing standing) {
         this.shown = shown;
-        this.size = PictureSize.of(width, height, choice.typeScale());
+        this.size = size;
         MachineLayout layout = MachineLayout.of(shown.machine());
         ThrowLayout own = layout.of(shown.throwIndex());
         ArrowSet arrows = new ArrowSet(shown.shownThrow(), shown.throwIndex(), own, choice.kinds(), size.weight());
         this.peaks = ForcePeaks.of(shown.summary(), arrows, own);
         Readout force = Readout.of(shown.units(), Column.Kind.FORCE, peaks.greatestForce());
         this.forceScale = ForceScale.of(peaks, size.longestArrow(), choice.arrowFactor(), force);
-        this.framing = framing.orElseGet(() ->
-                Framing.fit(layout, shown.throwIndex(), choice.alone(), peaks, forceScale, size.room(), size.weight()));
-        Scene scene = new Scene(shown, layout, this.framing, palette, choice, size);
-        this.headline = new Headline(scene, pen);
+        Optional<LinkagePicture> before = standing.before().filter(b -> b.size.equals(size));
+        this.framing = standing.framing()
+                .orElseGet(() -> new Framing.Fit(layout, shown.throwIndex(), choice.alone(), size)
+                        .of(peaks, forceScale, before.map(LinkagePicture::framing)));
+        Optional<Ghost> ghost = standing.held().map(Ghost::new);
+        Scene scene = new Scene(shown, layout, this.framing, palette, choice, size, ghost);
         this.still = new StillPainter(scene, forceScale, force, pen);
+        this.headline = new Headline(scene, pen, still.legendBox().x() - 10 * size.weight());
         LabelPlan plan = LabelPlan.of(
-                scene, peaks, forceScale, pen, List.of(headline.box(), still.legendBox(), still.footBox()));
+                scene,
+                peaks,
+                forceScale,
+                pen,
+                List.of(headline.box(), still.legendBox(), still.footBox()),
+                before.map(b -> b.moving.plan()));
         this.moving = new MovingPainter(scene, peaks, forceScale, plan, pen);
         this.movingBox = plan.movingBox();
     }

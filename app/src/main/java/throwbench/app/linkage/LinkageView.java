@@ -47,9 +47,10 @@ public final class LinkageView extends Region implements View {
     private @Nullable Shown shown;
     private @Nullable LinkagePicture picture;
     private Optional<Framing> ownFraming = Optional.empty();
+    private Optional<Shown> held = Optional.empty();
     private boolean stale = true;
     private double drawnAngle = Double.NaN;
-    private String spoken = "";
+    private boolean unspoken = true;
 
     public LinkageView(Playhead playhead) {
         this.playhead = playhead;
@@ -114,6 +115,13 @@ public final class LinkageView extends Region implements View {
     /** Shows the whole machine again after zooming and panning. */
     public void frameAll() {
         ownFraming = Optional.empty();
+        picture = null;
+        spoil();
+    }
+
+    /** Draws a held design as a ghost under the present one, or none. */
+    public void hold(Optional<Shown> design) {
+        held = design;
         spoil();
     }
 
@@ -148,7 +156,8 @@ public final class LinkageView extends Region implements View {
         if (all || drawn == null) {
             drawn = settle(state, width, height);
         }
-        if (all || instant.crankAngle() != drawnAngle) {
+        boolean turned = all || instant.crankAngle() != drawnAngle;
+        if (turned) {
             clear(movingCanvas);
             drawn.paintMoving(movingPen, instant);
             clear(headlineCanvas);
@@ -156,12 +165,24 @@ public final class LinkageView extends Region implements View {
             drawnAngle = instant.crankAngle();
             hands.follow();
         }
-        speak(drawn, instant);
+        unspoken |= turned;
+        // who cannot see hears the angle and the load once the crank stands still
+        if (unspoken && !playhead.playing().get()) {
+            unspoken = false;
+            setAccessibleText("Linkage view. " + drawn.spoken(instant));
+        }
     }
 
     private LinkagePicture settle(Shown state, double width, double height) {
         LinkageChoice choice = new LinkageChoice(kinds.get(), arrowFactor.get(), alone.get(), typeScale.get(), true);
-        LinkagePicture next = new LinkagePicture(state, palette, choice, width, height, stillPen, ownFraming);
+        LinkagePicture next = new LinkagePicture(
+                state,
+                palette,
+                choice,
+                PictureSize.of(width, height, choice.typeScale()),
+                stillPen,
+                new LinkagePicture.Standing(
+                        ownFraming, Optional.ofNullable(picture).filter(p -> follows(p, state)), held));
         picture = next;
         place(stillCanvas, new Box(0, 0, width, height));
         clear(stillCanvas);
@@ -170,6 +191,13 @@ public final class LinkageView extends Region implements View {
         place(headlineCanvas, next.headlineBox());
         stale = false;
         return next;
+    }
+
+    /** Whether a state is another one of the same throw, whose drawing had better not jump. */
+    private static boolean follows(LinkagePicture before, Shown state) {
+        return before.shown().throwIndex() == state.throwIndex()
+                && before.shown().machine().throwsInOrder().size()
+                        == state.machine().throwsInOrder().size();
     }
 
     /** Puts a layer where its part of the picture is; its pen keeps counting from the view's corner. */
@@ -187,24 +215,17 @@ public final class LinkageView extends Region implements View {
                 .clearRect(canvas.getLayoutX(), canvas.getLayoutY(), canvas.getWidth(), canvas.getHeight());
     }
 
-    /** Who cannot see hears the angle and the load once the crank stands still. */
-    private void speak(LinkagePicture drawn, Instant instant) {
-        if (playhead.playing().get()) {
-            return;
-        }
-        String sentence = drawn.spoken(instant);
-        if (!sentence.equals(spoken)) {
-            spoken = sentence;
-            setAccessibleText("Linkage view. " + sentence);
-        }
-    }
-
     Optional<LinkagePicture> picture() {
         return Optional.ofNullable(picture);
     }
 
     HoverLabel hoverLabel() {
         return hoverLabel;
+    }
+
+    /** The user's framing, drawn or not yet. */
+    Optional<Framing> framing() {
+        return ownFraming;
     }
 
     /** Lets the user's framing go before the one that shows all. */

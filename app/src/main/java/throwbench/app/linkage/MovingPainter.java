@@ -41,6 +41,8 @@ final class MovingPainter {
     private final List<ThrowAxes> axes = new ArrayList<>();
     private final Look full;
     private final Look outline;
+    private final Look held;
+    private final ThrowAxes ghostAxes;
     private final ThrowPen drawn;
     private final ArrowPainter arrowPainter;
     private final ArrowPlaces places;
@@ -63,6 +65,8 @@ final class MovingPainter {
         }
         this.full = scene.full();
         this.outline = scene.outline();
+        this.held = scene.held();
+        this.ghostAxes = scene.ghost().map(g -> g.axes(scene.framing())).orElseGet(scene::axes);
         this.drawn = new ThrowPen(pen, axes.get(own));
         this.arrowPainter = new ArrowPainter(pen, scene.weight());
         this.places = new ArrowPlaces(arrows.size());
@@ -79,6 +83,9 @@ final class MovingPainter {
                 drawn.on(pen, axes.get(i));
                 gear(scene.layout().of(i), poses.get(i), outline);
             }
+        }
+        if (scene.ghost().isPresent()) {
+            scene.ghost().get().paintMoving(drawn.on(pen, ghostAxes), instant.crankAngle(), held);
         }
         Pose pose = poses.get(own);
         drawn.on(pen, axes.get(own));
@@ -163,7 +170,7 @@ final class MovingPainter {
     /** Where the torque's arc begins, rad counter-clockwise from the right. */
     double arcStart() {
         ThrowAxes at = axes.get(own);
-        return Math.atan2(at.sin(), at.cos()) + ArrowSet.ARC_START;
+        return Math.atan2(at.sin(), at.cos()) + arrows.arcStart();
     }
 
     /** Extent of the torque's arc as it was last drawn, rad. */

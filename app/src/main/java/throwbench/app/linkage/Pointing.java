@@ -125,8 +125,9 @@ final class Pointing {
         if (!slider.trunk() && along > -slider.back() && along < slider.front() && across < slider.halfHeight()) {
             return target(Part.CROSSHEAD, Column.VELOCITY);
         }
-        for (RodLine.Piston p : own.line().pistons()) {
-            double back = slider.trunk() && p == own.line().pistons().get(0) ? -slider.back() : p.crankFace();
+        for (int i = 0; i < own.line().pistons().size(); i++) {
+            RodLine.Piston p = own.line().pistons().get(i);
+            double back = slider.trunk() && i == 0 ? -slider.back() : p.crankFace();
             if (along > back && along < p.headFace() && across < p.radius()) {
                 return target(
                         p.plunger() ? Part.PISTON_ROD : Part.PISTON, p.plunger() ? Column.ROD_LOAD : Column.TRAVEL);
@@ -205,14 +206,12 @@ final class Pointing {
                                                 .value())
                                 .text(instant.pressure(own, chamber));
             }
-            case CRANK_PIN, CROSSHEAD_PIN ->
-                target.part().text() + "  "
-                        + value(
-                                Column.Kind.FORCE,
-                                Math.hypot(
-                                        instant.at(target.columns().get(0)),
-                                        instant.at(target.columns().get(1))),
-                                painted.peaks().greatestForce());
+            case CRANK_PIN, CROSSHEAD_PIN -> {
+                Column x = target.columns().get(0);
+                Column y = target.columns().get(1);
+                double force = Math.hypot(instant.at(x), instant.at(y));
+                yield target.part().text() + "  " + value(Column.Kind.FORCE, force, Math.hypot(peak(x), peak(y)));
+            }
             default -> {
                 Column column = target.columns().get(0);
                 yield target.part().text() + "  " + words(column) + " "

@@ -1,5 +1,6 @@
 package throwbench.app.linkage;
 
+import java.util.Optional;
 import throwbench.app.bench.Shown;
 import throwbench.app.drawing.Palette;
 import throwbench.app.linkage.parts.Look;
@@ -8,7 +9,13 @@ import throwbench.app.linkage.parts.ThrowLayout;
 
 /** What every painter of one picture shares. */
 record Scene(
-        Shown shown, MachineLayout layout, Framing framing, Palette palette, LinkageChoice choice, PictureSize size) {
+        Shown shown,
+        MachineLayout layout,
+        Framing framing,
+        Palette palette,
+        LinkageChoice choice,
+        PictureSize size,
+        Optional<Ghost> ghost) {
 
     /** The layout of the shown throw. */
     ThrowLayout own() {
@@ -26,6 +33,10 @@ record Scene(
 
     Look outline() {
         return Look.outline(palette, size.weight());
+    }
+
+    Look held() {
+        return Look.held(palette, size.weight());
     }
 
     double weight() {

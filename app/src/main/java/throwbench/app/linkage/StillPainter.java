@@ -47,10 +47,8 @@ final class StillPainter {
         double w = scene.weight();
         double border = scene.size().border();
         pen.font(11 * w, false);
-        double text = Math.max(
-                110 * w,
-                pen.width(pressure.number(range.least())) + 14 * w + pen.width(pressure.text(range.greatest())));
-        double narrow = Math.min(text, 0.3 * scene.size().width());
+        double texts = pen.width(pressure.number(range.least())) + 14 * w + pen.width(pressure.text(range.greatest()));
+        double narrow = Math.max(texts, Math.min(110 * w, 0.22 * scene.size().width()));
         legendBox = new Box(scene.size().width() - border - narrow, 14 * w, narrow, 28 * w);
         double foot = forceScale.barLength() + 10 * w + pen.width(force.text(forceScale.bar()));
         double hint = pen.width(HINT) + 28 * w;
@@ -76,6 +74,7 @@ final class StillPainter {
                 CylinderPainter.paint(drawn, scene.layout().of(i), outline);
             }
         }
+        scene.ghost().ifPresent(g -> g.paintStill(drawn.on(pen, g.axes(scene.framing())), scene.held()));
         drawn.on(pen, scene.axes());
         crankCircle();
         strokeLine(scene.own(), false);
@@ -107,7 +106,7 @@ final class StillPainter {
                 : Palette.mix(palette.ground().surface(), palette.ground().soft(), 0.55);
         ThrowLayout.Extent extent = layout.extent();
         double e = layout.linkage().guideOffset();
-        double over = drawn.metres(10 * w);
+        double over = drawn.metres(6 * w);
         drawn.pen().stroke(colour, 0.9 * w);
         drawn.pen().dash(14 * w, 4 * w, 2 * w, 4 * w);
         drawn.line(extent.leastX() - over, e, extent.greatestX() + over, e);
@@ -152,20 +151,22 @@ final class StillPainter {
         double w = scene.weight();
         RodLine.Barrel barrel = scene.own().line().barrels().get(0);
         ThrowAxes axes = scene.axes();
-        double outside = scene.own().linkage().guideOffset() - barrel.radius() - barrel.wall();
-        double from = outside - drawn.metres(3 * w);
-        double to = outside - drawn.metres((MARK - 20) * w);
+        int up = axes.upper();
+        double outside = scene.own().linkage().guideOffset() - up * (barrel.radius() + barrel.wall());
+        double from = outside - up * drawn.metres(3 * w);
+        double to = outside - up * drawn.metres((MARK - 20) * w);
         pen.stroke(scene.palette().ground().soft(), w);
         pen.dash(3 * w, 3 * w);
         drawn.line(x, from, x, to);
         pen.dash();
         pen.font(11 * w, false);
         pen.fill(scene.palette().ground().soft());
-        // beyond the mark's end, along −y of the throw
-        double px = axes.px(x, to) + axes.sin() * 6 * w;
-        double py = axes.py(x, to) + axes.cos() * 6 * w;
-        Align align = axes.sin() > 0.5 ? Align.LEFT : axes.sin() < -0.5 ? Align.RIGHT : Align.CENTRE;
-        double down = Math.abs(axes.sin()) > 0.5 ? 4 * w : axes.cos() > 0 ? 9 * w : 0;
+        // beyond the mark's end, away from the upper side
+        double outX = up * axes.sin();
+        double px = axes.px(x, to) + outX * 6 * w;
+        double py = axes.py(x, to) + up * axes.cos() * 6 * w;
+        Align align = outX > 0.5 ? Align.LEFT : outX < -0.5 ? Align.RIGHT : Align.CENTRE;
+        double down = Math.abs(outX) > 0.5 ? 4 * w : 9 * w;
         pen.text(name, px, py + down, align);
     }
 

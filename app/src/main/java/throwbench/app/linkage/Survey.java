@@ -52,6 +52,7 @@ final class Survey {
                 parts(scene.layout().of(i), scene.layout().axes(i, scene.framing()), OTHERS);
             }
         }
+        scene.ghost().ifPresent(g -> parts(g.layout(), g.axes(scene.framing()), OTHERS));
         parts(scene.own(), axes, PARTS);
         arrows();
         occupancy.sum();
@@ -143,7 +144,7 @@ final class Survey {
     private void torque(int i, int look) {
         double most = Math.abs(peaks.forceX(look, i)) * scale.radPerNewtonMetre();
         double radius = arcRadius(scene);
-        double direction = Math.atan2(axes.sin(), axes.cos()) + ArrowSet.ARC_START;
+        double direction = Math.atan2(axes.sin(), axes.cos()) + peaks.arrows().arcStart();
         for (int step = -8; step <= 8; step++) {
             double a = direction + most * step / 8;
             double x = axes.originX() + radius * Math.cos(a);
@@ -177,13 +178,14 @@ final class Survey {
         RodLine.Piston first = scene.own().line().pistons().get(0);
         RodLine.Barrel barrel = scene.own().line().barrels().get(0);
         double at = first.plunger() ? first.headFace() : RodLine.middle(first);
-        double y = scene.own().linkage().guideOffset() - barrel.radius() - barrel.wall();
+        int up = axes.upper();
+        double y = scene.own().linkage().guideOffset() - up * (barrel.radius() + barrel.wall());
         Linkage linkage = scene.own().linkage();
         for (double x : new double[] {linkage.leastReach() + at, linkage.greatestReach() + at}) {
             double px = axes.px(x, y);
             double py = axes.py(x, y);
-            double endX = px + axes.sin() * StillPainter.MARK * w;
-            double endY = py + axes.cos() * StillPainter.MARK * w;
+            double endX = px + up * axes.sin() * StillPainter.MARK * w;
+            double endY = py + up * axes.cos() * StillPainter.MARK * w;
             double wide = 14 * w * (1 - Math.abs(axes.sin()));
             boxes.add(new Box(
                     Math.min(px, endX) - wide,

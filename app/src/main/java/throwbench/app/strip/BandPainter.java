@@ -96,7 +96,9 @@ final class BandPainter {
         double base = band.middle() + size * 0.36;
         double lift = caption.second.isEmpty() ? 0 : size * 0.55;
         pen.text(caption.first, start + 2 * size, base - lift, Pen.Align.LEFT);
-        pen.text(caption.second, start + 2 * size, base + lift, Pen.Align.LEFT);
+        if (lift > 0) {
+            pen.text(caption.second, start + 2 * size, base + lift, Pen.Align.LEFT);
+        }
     }
 
     /** The pattern of the rod, so that the span says its sign without words and colour. */

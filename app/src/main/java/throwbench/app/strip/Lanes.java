@@ -1,6 +1,7 @@
 package throwbench.app.strip;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import throwbench.app.drawing.ColumnWords;
@@ -16,6 +17,11 @@ public final class Lanes {
     /** Columns that are always shown. */
     static final List<Column> USUAL =
             List.of(Column.GAS_LOAD, Column.INERTIA_LOAD, Column.ROD_LOAD, Column.THROW_TORQUE, Column.VELOCITY);
+
+    /** Columns that may be added: the others, without the axis itself. */
+    static final List<Column> ADDABLE = Arrays.stream(Column.values())
+            .filter(c -> c != Column.CRANK_ANGLE && !USUAL.contains(c))
+            .toList();
 
     private Lanes() {}
 

@@ -25,12 +25,12 @@ final class ScrubKeys {
             KeyCode key, boolean coarse, boolean fine, double angle, double crankEnd, StripEvents events) {
         double step = coarse ? COARSE : fine ? FINE : PLAIN;
         return switch (key) {
-            case RIGHT, KP_RIGHT, UP, KP_UP -> OptionalDouble.of(turned(angle, step));
-            case LEFT, KP_LEFT, DOWN, KP_DOWN -> OptionalDouble.of(turned(angle, -step));
+            case RIGHT, KP_RIGHT -> OptionalDouble.of(turned(angle, step));
+            case LEFT, KP_LEFT -> OptionalDouble.of(turned(angle, -step));
             case HOME -> OptionalDouble.of(0);
             case END -> OptionalDouble.of(crankEnd);
-            case N, PAGE_DOWN -> events.next(angle);
-            case B, PAGE_UP -> events.previous(angle);
+            case N -> events.next(angle);
+            case B -> events.previous(angle);
             default -> OptionalDouble.empty();
         };
     }

@@ -45,7 +45,7 @@ record StripLayout(
     }
 
     static StripLayout of(double width, double height, List<Lane> lanes, int chambers) {
-        double left = Math.rint(Math.max(140, Math.min(182, 0.19 * width)));
+        double left = Math.rint(Math.max(146, Math.min(182, 0.19 * width)));
         double right = Math.max(left + 60, width - (width >= 700 ? 62 : 54));
         double bandHeight = height >= 400 ? 31 : height >= 230 ? 27 : 20;
         Row band = new Row(EDGE, EDGE + bandHeight);

@@ -14,8 +14,6 @@ final class StripPainter {
     private final ValvePainter valves = new ValvePainter();
 
     void paint(Pen pen, StripPlot plot, Palette palette) {
-        pen.fill(palette.ground().surface());
-        pen.rect(0, 0, plot.layout().width(), plot.layout().height(), 0, true, false);
         axis.grid(pen, plot, palette);
         band.paint(pen, plot, palette);
         axis.paint(pen, plot, palette);

@@ -4,27 +4,23 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import javafx.scene.AccessibleRole;
-import javafx.scene.Cursor;
 import javafx.scene.canvas.Canvas;
 import javafx.scene.control.Label;
 import javafx.scene.input.KeyEvent;
-import javafx.scene.input.MouseEvent;
 import javafx.scene.layout.Region;
 import org.jspecify.annotations.Nullable;
 import throwbench.app.bench.Playhead;
 import throwbench.app.bench.Shown;
+import throwbench.app.drawing.ColumnMenu;
 import throwbench.app.drawing.FxPen;
 import throwbench.app.drawing.Palette;
 import throwbench.app.drawing.PaletteStyle;
 import throwbench.app.drawing.Readout;
-import throwbench.app.drawing.Signal;
 import throwbench.app.drawing.View;
 import throwbench.solver.mechanism.Angles;
 import throwbench.solver.revolution.Column;
 import throwbench.solver.revolution.Instant;
-import throwbench.solver.revolution.RunningThrow;
 
 /**
  * The revolution strip on the screen. Three layers: what stands still, the present values, the cursor; a moving crank only
@@ -32,11 +28,8 @@ import throwbench.solver.revolution.RunningThrow;
  */
 public final class StripView extends Region implements View {
 
-    /** Scrubbing by mouse goes to tenths of a degree: what is shown is then exactly where the crank stands. */
-    private static final double TENTHS = 10;
-
-    /** Points from an event's mark within which the mouse is on it. */
-    private static final double NEAR = 4;
+    /** Width of the button from which traces are added. */
+    private static final double MENU = 26;
 
     private final Playhead playhead;
     private final Canvas still = new Canvas();
@@ -47,6 +40,8 @@ public final class StripView extends Region implements View {
     private final FxPen cursorPen = new FxPen(cursor.getGraphicsContext2D());
     private final Region focusFrame = new Region();
     private final Label hint = new Label();
+    private final ColumnMenu menu;
+    private final StripHands hands;
     private final PlaceField place;
     private final StripPainter painter = new StripPainter();
     private final CursorPainter cursorPainter = new CursorPainter();
@@ -57,19 +52,12 @@ public final class StripView extends Region implements View {
     private boolean stale = true;
     private double drawnAngle = Double.NaN;
     private long stillDrawings;
-    private boolean scrubbing;
 
     public StripView(Playhead playhead) {
         this.playhead = playhead;
-        this.place = new PlaceField(
-                text -> {
-                    Shown now = shown.orElseThrow();
-                    RunningThrow running = now.running().throwsInOrder().get(now.throwIndex());
-                    return TypedPlace.read(
-                            text, running.body().linkage(), now.running().rotation(), now.units());
-                },
-                this::stopAt,
-                this::requestFocus);
+        this.hands = new StripHands(this, playhead, hint);
+        this.place = new PlaceField(this::read, hands::stopAt, this::requestFocus);
+        this.menu = new ColumnMenu("Add traces or take them off", Lanes.ADDABLE, this::isAdded, this::trace);
         setId("revolution-strip");
         getStyleClass().add("revolution-strip");
         getStylesheets()
@@ -78,12 +66,7 @@ public final class StripView extends Region implements View {
         focusFrame.getStyleClass().add("strip-focus");
         focusFrame.visibleProperty().bind(focusVisibleProperty());
         focusFrame.setMouseTransparent(true);
-        hint.setId("strip-hint");
-        hint.getStyleClass().add("strip-message");
-        hint.setMouseTransparent(true);
-        hint.setManaged(false);
-        hint.setVisible(false);
-        getChildren().addAll(still, values, cursor, focusFrame, hint, place);
+        getChildren().addAll(still, values, cursor, focusFrame, hint, menu, place);
         setFocusTraversable(true);
         setAccessibleRole(AccessibleRole.SLIDER);
         setAccessibleText("Revolution strip");
@@ -92,12 +75,6 @@ public final class StripView extends Region implements View {
                         + " centres, N and B to the next event and the one before.");
         setMinSize(420, 180);
         setPrefSize(900, 330);
-        setOnMousePressed(this::press);
-        setOnMouseDragged(this::drag);
-        setOnMouseReleased(e -> scrubbing = false);
-        setOnMouseMoved(this::hover);
-        setOnMouseExited(e -> hint.setVisible(false));
-        setOnKeyPressed(this::key);
         wear(palette);
     }
 
@@ -128,9 +105,40 @@ public final class StripView extends Region implements View {
         stale |= added.remove(column);
     }
 
+    private boolean isAdded(Column column) {
+        return added.contains(column);
+    }
+
+    private void trace(Column column, boolean on) {
+        if (on) {
+            addTrace(column);
+        } else {
+            removeTrace(column);
+        }
+    }
+
     /** The columns that were added, in that order. */
     public List<Column> addedTraces() {
         return List.copyOf(added);
+    }
+
+    /**
+     * Turns the crank by a key, wherever in the window it was pressed; a key that belongs to a text or turns nothing is left
+     * alone.
+     */
+    public void scrub(KeyEvent event) {
+        hands.key(event);
+    }
+
+    private TypedPlace read(String text) {
+        Shown now = shown.orElseThrow();
+        return TypedPlace.read(text, now.shownThrow().linkage(), now.running().rotation(), now.units());
+    }
+
+    /** What was drawn last. */
+    @Nullable
+    StripPlot plot() {
+        return plot;
     }
 
     /** Puts the keyboard into the field for an angle or a travel. */
@@ -173,6 +181,7 @@ public final class StripView extends Region implements View {
         size(values, LegendPainter.VALUE + 4, getHeight());
         size(cursor, 2 * CursorPainter.REACH, getHeight());
         values.setLayoutX(known.layout().left() - LegendPainter.VALUE - 10);
+        stillPen.clear(still.getWidth(), still.getHeight());
         painter.paint(stillPen, known, palette);
         requestLayout();
     }
@@ -204,7 +213,9 @@ public final class StripView extends Region implements View {
         }
         StripLayout layout = drawn.layout();
         double fieldHeight = place.prefHeight(-1);
-        place.resizeRelocate(8, Math.rint(layout.band().middle() - fieldHeight / 2), layout.left() - 20, fieldHeight);
+        place.resizeRelocate(
+                8, Math.rint(layout.band().middle() - fieldHeight / 2), layout.left() - 24 - MENU, fieldHeight);
+        menu.resizeRelocate(layout.left() - 12 - MENU, place.getLayoutY(), MENU, fieldHeight);
         focusFrame.resizeRelocate(
                 layout.left() - 4,
                 2,
@@ -223,87 +234,5 @@ public final class StripView extends Region implements View {
     protected void setHeight(double height) {
         stale |= height != getHeight();
         super.setHeight(height);
-    }
-
-    private boolean inPlot(MouseEvent event) {
-        StripPlot drawn = plot;
-        return drawn != null
-                && event.getX() >= drawn.layout().left() - 10
-                && event.getX() <= drawn.layout().right() + 10;
-    }
-
-    private Optional<Column> removable(MouseEvent event) {
-        StripPlot drawn = plot;
-        return drawn == null
-                ? Optional.empty()
-                : LegendPainter.removable(drawn, event.getX(), event.getY())
-                        .map(StripTrace::signal)
-                        .filter(Signal.OfColumn.class::isInstance)
-                        .map(s -> ((Signal.OfColumn) s).column());
-    }
-
-    /** Names what stands under the mouse: the events at its angle, or what a click would take off. */
-    private void hover(MouseEvent event) {
-        StripPlot drawn = plot;
-        boolean plotted = inPlot(event);
-        boolean removes = removable(event).isPresent();
-        setCursor(plotted ? Cursor.H_RESIZE : removes ? Cursor.HAND : Cursor.DEFAULT);
-        String words = removes
-                ? "click: take this trace off"
-                : plotted && drawn != null ? drawn.eventsAt(event.getX(), NEAR) : "";
-        hint.setText(words);
-        hint.setVisible(!words.isEmpty());
-        if (!words.isEmpty()) {
-            hint.autosize();
-            double x = Math.min(event.getX() + 14, getWidth() - hint.getWidth() - 4);
-            double y = event.getY() + 18 + hint.getHeight() > getHeight()
-                    ? event.getY() - hint.getHeight() - 8
-                    : event.getY() + 18;
-            hint.relocate(x, y);
-        }
-    }
-
-    private void press(MouseEvent event) {
-        requestFocus();
-        removable(event).ifPresent(this::removeTrace);
-        scrubbing = inPlot(event);
-        drag(event);
-    }
-
-    private void drag(MouseEvent event) {
-        StripPlot drawn = plot;
-        if (scrubbing && drawn != null) {
-            double degrees = Math.toDegrees(drawn.layout().angle(event.getX()));
-            stopAt(Math.toRadians(Math.rint(degrees * TENTHS) / TENTHS));
-            event.consume();
-        }
-    }
-
-    private void key(KeyEvent event) {
-        StripPlot drawn = plot;
-        if (event.getTarget() != this || event.isAltDown() || drawn == null) {
-            return;
-        }
-        RunningThrow running =
-                drawn.shown().running().throwsInOrder().get(drawn.shown().throwIndex());
-        OptionalDouble turned = ScrubKeys.after(
-                event.getCode(),
-                event.isShiftDown(),
-                event.isShortcutDown() || event.isControlDown(),
-                playhead.crankAngle().get(),
-                running.body()
-                        .linkage()
-                        .crankEndDeadCentre(drawn.shown().running().rotation()),
-                drawn.events());
-        if (turned.isPresent()) {
-            stopAt(turned.getAsDouble());
-            event.consume();
-        }
-    }
-
-    /** Who scrubs wants to look: the crank stops where it was put. */
-    private void stopAt(double angle) {
-        playhead.setPlaying(false);
-        playhead.turnTo(angle);
     }
 }

@@ -11,6 +11,7 @@ import javafx.geometry.Rectangle2D;
 import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.control.SplitPane;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.BorderPane;
 import javafx.stage.Screen;
 import javafx.stage.Stage;
@@ -31,7 +32,7 @@ final class BenchWindow implements MachineMenu.Actions {
 
     private static final double LARGEST_HEIGHT = 1080;
     private static final double SHEET_SHARE = 0.165;
-    private static final double SHEET_LEAST = 282;
+    private static final double SHEET_LEAST = 304;
     private static final double SIDE_SHARE = 0.215;
     private static final double SIDE_LEAST = 300;
 
@@ -79,6 +80,8 @@ final class BenchWindow implements MachineMenu.Actions {
         scene = new Scene(root, 1600, 900);
         wear(Theme.LIGHT);
         Keys.install(scene, bench, this);
+        // keys that no control took turn the crank, wherever the keyboard is
+        scene.addEventHandler(KeyEvent.KEY_PRESSED, strip::scrub);
         clock = new FrameClock(bench, List.<View>of(linkage, strip, gauges, findings));
         measuring = status.measure(clock.times());
         bench.shown().addListener((o, before, now) -> tellHistory());

@@ -17,7 +17,7 @@ final class Keys {
             Space\tturn the crank, or hold it
             ← →\t1° back or on; with Shift 10°, with Ctrl 0.1°
             Home, End\thead-end and crank-end dead centre
-            , .\tthe event before, the next event
+            B, N\tthe event before, the next event
             Page Up, Page Down\tthe duty point before, the next one
             F8\tframe the whole linkage; wheel zooms, drag moves
             F6, F7\tbuild sheet; gauges and findings

@@ -20,6 +20,9 @@ import throwbench.solver.document.quantity.UnitSystem;
 /** Machine name, duty point, throw and units; play and shown speed. */
 final class TopBar extends HBox {
 
+    /** In the order of the choice. */
+    private static final List<UnitSystem> UNITS = List.of(UnitSystem.SI, UnitSystem.US);
+
     private final Bench bench;
     private final Label name = new Label();
     private final Label edited = new Label("edited");
@@ -50,8 +53,8 @@ final class TopBar extends HBox {
                         menu,
                         name,
                         edited,
-                        choice(duty, "duty", "duty point (Page Up, Page Down)", 190, bench::chooseDuty),
-                        choice(shownThrow, "throw", "throw shown in full", 100, bench::chooseThrow),
+                        choice(duty, "duty", "duty point (Page Up, Page Down)", 230, bench::chooseDuty),
+                        choice(shownThrow, "throw", "throw shown in full", 124, bench::chooseThrow),
                         choice(units, "units", "units in which values are shown", 90, this::chooseUnits),
                         left,
                         play(),
@@ -59,7 +62,7 @@ final class TopBar extends HBox {
                         speedText,
                         right);
         setAlignment(Pos.CENTER_LEFT);
-        units.getItems().addAll("SI", "US");
+        units.getItems().setAll("SI", "US");
         bench.shown().addListener((o, before, now) -> take(now));
         bench.file().addListener((o, before, now) -> take(bench.shown().get()));
         bench.playhead().playing().addListener((o, before, now) -> playing(now));
@@ -91,7 +94,7 @@ final class TopBar extends HBox {
     }
 
     private void chooseUnits(int index) {
-        bench.chooseUnits(UnitSystem.values()[index]);
+        bench.chooseUnits(UNITS.get(index));
     }
 
     private Button play() {
@@ -133,7 +136,7 @@ final class TopBar extends HBox {
                         .map(t -> "throw " + t.name())
                         .toList(),
                 shown.throwIndex());
-        units.getSelectionModel().select(shown.units().ordinal());
+        units.getSelectionModel().select(UNITS.indexOf(shown.units()));
         tellSpeed(shown);
         taking = false;
     }

@@ -11,7 +11,6 @@ import throwbench.solver.chamber.IdealValves;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.attached.AttachedFiles;
-import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.finding.Judgement;
 import throwbench.solver.fluid.PerfectGas;
@@ -19,6 +18,7 @@ import throwbench.solver.load.ConnectingRod;
 import throwbench.solver.load.Crank;
 import throwbench.solver.load.Friction;
 import throwbench.solver.load.ReciprocatingMasses;
+import throwbench.solver.machine.Bookmark;
 import throwbench.solver.machine.Chamber;
 import throwbench.solver.machine.Drive;
 import throwbench.solver.machine.Driver;
@@ -100,6 +100,23 @@ public final class ShownMachines {
                 like.bookmarks());
     }
 
+    /** A machine with bookmarks. */
+    public static Machine withBookmarks(Machine like, List<Bookmark> bookmarks) {
+        return new Machine(
+                like.name(),
+                like.notes(),
+                like.site(),
+                like.drive(),
+                like.fluids(),
+                like.stages(),
+                like.throwsInOrder(),
+                like.dutyPoints(),
+                like.limits(),
+                like.loadSteps(),
+                like.ranges(),
+                bookmarks);
+    }
+
     /** A machine with other limits. */
     public static Machine withLimits(Machine like, Limits limits) {
         return new Machine(
@@ -135,9 +152,8 @@ public final class ShownMachines {
     }
 
     /** These machines are made from records: no file describes them, and no view reads one. */
-    private static final MachineDocument NO_FILE = MachineDocument.read("{}", AttachedFiles.NONE, GasNames.ANY)
-            .document()
-            .orElseThrow();
+    private static final MachineDocument NO_FILE =
+            MachineDocument.read("{}", AttachedFiles.NONE).document().orElseThrow();
 
     /** The state of the bench for a duty point of a machine's first throw, SI. */
     public static Shown shown(Machine machine, int dutyIndex) {

@@ -11,8 +11,8 @@ import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import throwbench.app.Samples;
 import throwbench.app.Release;
+import throwbench.app.Samples;
 
 class CommandLineTest {
 
@@ -176,10 +176,15 @@ class CommandLineTest {
 
     @Test
     void whatCannotBeSolvedIsRefusedWithItsPlace() throws IOException {
-        String file = Run.machine(folder, "{ \"kind\": \"constant-speed\" }", "{ \"kind\": \"constant-torque\" }")
-                .toString();
-        String refusal = file + ": drive.driver.kind: constant-torque drivers are not solved by this version;"
-                + " use constant-speed\n";
+        Path cold = Run.machine(
+                folder,
+                "\"molarMass\": \"27.2 g/mol\", \"isentropicExponent\": 1.29",
+                "\"mixture\": { \"methane\": 1 }");
+        Run.machineWith(cold, text -> text.replace("\"32 degC\"", "\"-150 degC\""));
+        String file = cold.toString();
+        String reason = "the heat capacity of methane is known from 200 K to 1000 K, not at 123.1 K\n";
+        String refusal =
+                file + ": throws[0].chambers[0].cycle: " + reason + file + ": throws[0].chambers[1].cycle: " + reason;
 
         assertRefused(refusal, "solve", file);
         assertRefused(refusal, "check", file);

@@ -8,7 +8,7 @@ import java.util.List;
 public final class RecordingPen implements Pen {
 
     /** A poly-line with the line it was drawn in. */
-    public record Polyline(int rgb, double width, List<Double> dashes, double[] x, double[] y) {}
+    public record Polyline(int rgb, double width, List<Double> dashes, List<Double> x, List<Double> y) {}
 
     /** A written text with the place of its box. */
     public record Written(String text, double x, double y, double left, double right, double size, int rgb) {}
@@ -23,7 +23,7 @@ public final class RecordingPen implements Pen {
     public record Segment(int rgb, double x1, double y1, double x2, double y2) {}
 
     /** A polygon. */
-    public record Shape(int rgb, double[] x, double[] y) {}
+    public record Shape(int rgb, List<Double> x, List<Double> y) {}
 
     public final List<Polyline> polylines = new ArrayList<>();
     public final List<Written> texts = new ArrayList<>();
@@ -37,6 +37,26 @@ public final class RecordingPen implements Pen {
     private int fillRgb;
     private double opacity = 1;
     private double size = 12;
+
+    /** Pairs of texts that touch: their boxes overlap and their baselines are nearer than the height of capitals. */
+    public List<String> touching() {
+        List<String> pairs = new ArrayList<>();
+        for (int i = 0; i < texts.size(); i++) {
+            Written a = texts.get(i);
+            for (Written b : texts.subList(0, i)) {
+                boolean beside = a.right() <= b.left() || b.right() <= a.left();
+                boolean below = Math.abs(a.y() - b.y()) >= 0.72 * Math.min(a.size(), b.size());
+                if (!beside && !below) {
+                    pairs.add(a + " touches " + b);
+                }
+            }
+        }
+        return pairs;
+    }
+
+    private static List<Double> first(double[] values, int n) {
+        return Arrays.stream(values, 0, n).boxed().toList();
+    }
 
     @Override
     public void stroke(int rgb, double width) {
@@ -73,12 +93,12 @@ public final class RecordingPen implements Pen {
 
     @Override
     public void polyline(double[] x, double[] y, int n) {
-        polylines.add(new Polyline(strokeRgb, strokeWidth, dashes, Arrays.copyOf(x, n), Arrays.copyOf(y, n)));
+        polylines.add(new Polyline(strokeRgb, strokeWidth, dashes, first(x, n), first(y, n)));
     }
 
     @Override
     public void polygon(double[] x, double[] y, int n, boolean filled, boolean outlined) {
-        polygons.add(new Shape(filled ? fillRgb : strokeRgb, Arrays.copyOf(x, n), Arrays.copyOf(y, n)));
+        polygons.add(new Shape(filled ? fillRgb : strokeRgb, first(x, n), first(y, n)));
     }
 
     @Override

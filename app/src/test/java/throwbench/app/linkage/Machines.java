@@ -10,9 +10,9 @@ import throwbench.solver.chamber.IdealValves;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.attached.AttachedFiles;
-import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.fluid.Fluid;
+import throwbench.solver.fluid.Liquid;
 import throwbench.solver.fluid.PerfectGas;
 import throwbench.solver.load.ConnectingRod;
 import throwbench.solver.load.Crank;
@@ -46,7 +46,18 @@ final class Machines {
         return machine("Saltmarsh biogas booster", Rotation.COUNTER_CLOCKWISE, List.of(doubleActing("A", 0, 0, 0)));
     }
 
-    /** The same turning the other way, with the line of stroke above the crank centre. */
+    /** The same with every bore so many times as large. */
+    static Machine booster(double factor) {
+        List<Chamber> chambers = List.of(
+                chamber("A head", Side.HEAD, 0.32 * factor, 0, 0.14),
+                chamber("A crank", Side.CRANK, 0.32 * factor, 0.064, 0.16));
+        return machine(
+                "Saltmarsh biogas booster",
+                Rotation.COUNTER_CLOCKWISE,
+                List.of(of("A", 0, 0, new Linkage(0.075, 0.4, 0), new ReciprocatingMasses(38, 24, 42), chambers)));
+    }
+
+    /** The first turning the other way, with the line of stroke above the crank centre. */
     static Machine offset() {
         return machine("offset", Rotation.CLOCKWISE, List.of(doubleActing("A", 0, 0, 0.06)));
     }
@@ -102,7 +113,8 @@ final class Machines {
         return machine(
                 "triplex",
                 Rotation.COUNTER_CLOCKWISE,
-                List.of(plunger("1", 0), plunger("2", third), plunger("3", -third)));
+                List.of(plunger("1", 0), plunger("2", third), plunger("3", -third)),
+                new Liquid(1025, 2.2e9, 2300));
     }
 
     /** Every arrangement by name. */
@@ -111,13 +123,16 @@ final class Machines {
     }
 
     static Shown shown(Machine machine, int throwIndex) {
+        // the pressures of a pump are those of a gas here: what is drawn depends on them alone
+        Machine solved = machine(machine.name(), machine.drive().rotation(), machine.throwsInOrder());
+        RunningMachine settled =
+                RunningMachine.settle(solved, solved.dutyPoints().get(0)).get();
         RunningMachine running =
-                RunningMachine.settle(machine, machine.dutyPoints().get(0)).get();
+                new RunningMachine(machine, machine.dutyPoints().get(0), settled.throwsInOrder(), settled.speedCurve());
         Summary summary = Summary.of(running, throwIndex, Optional.empty());
         // these machines come from no file; the view reads nothing of it
-        MachineDocument none = MachineDocument.read("{}", AttachedFiles.NONE, GasNames.TABLE)
-                .document()
-                .orElseThrow();
+        MachineDocument none =
+                MachineDocument.read("{}", AttachedFiles.NONE).document().orElseThrow();
         return new Shown(none, machine, 0, throwIndex, summary, List.of(), UnitSystem.SI, 0);
     }
 
@@ -176,8 +191,12 @@ final class Machines {
     }
 
     private static Machine machine(String name, Rotation rotation, List<Throw> throwsInOrder) {
+        return machine(name, rotation, throwsInOrder, new PerfectGas(0.0272, 1.29));
+    }
+
+    private static Machine machine(String name, Rotation rotation, List<Throw> throwsInOrder, Fluid fluid) {
         double ambient = 101325;
-        Map<String, Fluid> fluids = Map.of("fluid", new PerfectGas(0.0272, 1.29));
+        Map<String, Fluid> fluids = Map.of("fluid", fluid);
         StageConditions conditions = new StageConditions(
                 OptionalDouble.of(4.1e5 + ambient), OptionalDouble.of(305.15), OptionalDouble.of(11.5e5 + ambient));
         return new Machine(

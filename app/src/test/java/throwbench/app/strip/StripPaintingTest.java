@@ -56,11 +56,10 @@ class StripPaintingTest {
     @Test
     void aTraceMovedByThreePointsIsFound() {
         StripPlot plot = plot(ShownMachines.shown(ShownMachines.booster(), 0), 900, 400);
-        List<RecordingPen.Polyline> moved = paint(plot).polylines;
-        double[] y = moved.get(4).y();
-        for (int i = 0; i < y.length; i++) {
-            y[i] += 3;
-        }
+        List<RecordingPen.Polyline> moved = new ArrayList<>(paint(plot).polylines);
+        RecordingPen.Polyline drawn = moved.get(4);
+        List<Double> y = drawn.y().stream().map(v -> v + 3).toList();
+        moved.set(4, new RecordingPen.Polyline(drawn.rgb(), drawn.width(), drawn.dashes(), drawn.x(), y));
         assertThrows(AssertionError.class, () -> assertTracesTrue(plot, moved));
     }
 
@@ -97,14 +96,14 @@ class StripPaintingTest {
             }
             for (double[] read : values) {
                 RecordingPen.Polyline line = drawn.get(at++);
-                assertEquals(721, line.x().length);
+                assertEquals(721, line.x().size());
                 for (int i = 0; i < read.length; i++) {
                     double x = plot.layout().left()
                             + (plot.layout().right() - plot.layout().left()) * i / 720;
                     double room = row.bottom() - row.top() - 2 * INSET;
                     double y = row.bottom() - INSET - (read[i] - low) / (high - low) * room;
-                    assertEquals(x, line.x()[i], TOLERANCE, () -> lane.kind() + " x");
-                    assertEquals(y, line.y()[i], TOLERANCE, () -> lane.kind() + " y");
+                    assertEquals(x, line.x().get(i), TOLERANCE, () -> lane.kind() + " x");
+                    assertEquals(y, line.y().get(i), TOLERANCE, () -> lane.kind() + " y");
                 }
             }
         }
@@ -175,8 +174,8 @@ class StripPaintingTest {
         double station = degrees * 2;
         int before = (int) Math.floor(station);
         for (int t = 0; t < traces.size(); t++) {
-            double[] y = traces.get(t).y();
-            double between = y[before] + (station - before) * (y[before + 1] - y[before]);
+            List<Double> y = traces.get(t).y();
+            double between = y.get(before) + (station - before) * (y.get(before + 1) - y.get(before));
             // over half a degree a chord leaves a curve of this size, or the corner where a valve opens, by this at
             // most
             assertEquals(between, pen.circles.get(t).y(), 0.2, "trace " + t);

@@ -4,9 +4,11 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.Arrays;
 import java.util.List;
 import javafx.scene.Scene;
 import javafx.scene.control.Label;
+import javafx.scene.control.MenuItem;
 import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
@@ -22,6 +24,7 @@ import org.testfx.framework.junit5.Stop;
 import throwbench.app.bench.Playhead;
 import throwbench.app.bench.Shown;
 import throwbench.app.bench.ShownMachines;
+import throwbench.app.drawing.ColumnMenu;
 import throwbench.app.drawing.Fonts;
 import throwbench.app.drawing.Palette;
 import throwbench.solver.mechanism.Linkage;
@@ -104,7 +107,7 @@ class StripViewTest {
         StripEvents events = StripEvents.of(shown);
         robot.type(KeyCode.N);
         assertEquals(events.next(crankEnd).orElseThrow(), playhead.crankAngle().get());
-        robot.type(KeyCode.PAGE_UP).type(KeyCode.B);
+        robot.type(KeyCode.B).type(KeyCode.B);
         assertEquals(
                 events.previous(crankEnd).orElseThrow(), playhead.crankAngle().get());
     }
@@ -184,6 +187,25 @@ class StripViewTest {
             draw();
             assertEquals(before + 1, strip.stillDrawings());
         });
+    }
+
+    @Test
+    void theMenuAddsAndTakesOffEveryColumnThatIsNotThereAnyway(FxRobot robot) {
+        ColumnMenu menu = robot.lookup(".column-menu").queryAs(ColumnMenu.class);
+        assertEquals(
+                Arrays.stream(Column.values())
+                        .filter(c -> c != Column.CRANK_ANGLE && !Lanes.USUAL.contains(c))
+                        .map(c -> "column-" + c.fileName())
+                        .toList(),
+                menu.getItems().stream().map(MenuItem::getId).toList());
+        robot.interact(() -> {
+            menu.getItems().forEach(MenuItem::fire);
+            draw();
+        });
+        assertEquals(menu.getItems().size(), strip.addedTraces().size());
+        robot.interact(() -> menu.getItems().forEach(MenuItem::fire));
+        assertEquals(List.of(), strip.addedTraces());
+        assertEquals("Add traces or take them off", menu.getAccessibleText());
     }
 
     @Test

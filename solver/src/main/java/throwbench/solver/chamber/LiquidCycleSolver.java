@@ -83,7 +83,7 @@ final class LiquidCycleSolver {
         if (!(lag < shorter)) {
             return String.format(
                     Locale.ROOT,
-                    "closingLag %.6g deg, want less than the shorter stroke of %.6g deg",
+                    "closingLag %.2f deg, want less than the shorter stroke of %.2f deg",
                     Math.toDegrees(lag),
                     Math.toDegrees(shorter));
         }

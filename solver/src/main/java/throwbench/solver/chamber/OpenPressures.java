@@ -44,7 +44,7 @@ record OpenPressures(LiquidValves valves, LineConditions lines, double stroke) {
         }
         return Optional.of(String.format(
                 Locale.ROOT,
-                "the discharge valve would stand open at %.6g Pa, which is not above the %.6g Pa of the open suction valve",
+                "the discharge valve would stand open at %.0f Pa, which is not above the %.0f Pa of the open suction valve",
                 discharge(least),
                 suction(least)));
     }

@@ -1,13 +1,11 @@
 package throwbench.solver.document;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import throwbench.solver.document.attached.AttachedFiles;
 import throwbench.solver.document.check.Checked;
 import throwbench.solver.document.check.Checker;
-import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.check.MachineBuilder;
 import throwbench.solver.document.check.Rules;
 import throwbench.solver.document.json.Flaw;
@@ -39,14 +37,14 @@ public final class MachineDocument {
     }
 
     /** Reads a text in one go; the reading holds its document wherever the text is a JSON object. */
-    public static Reading read(String text, AttachedFiles files, GasNames gases) {
+    public static Reading read(String text, AttachedFiles files) {
         Parsed parsed = JsonText.parse(text);
         if (parsed.root().isEmpty()) {
             List<Fault> faults =
                     parsed.flaws().stream().map(MachineDocument::fault).toList();
             return new Reading(Optional.empty(), Optional.empty(), faults);
         }
-        return new MachineDocument(text, parsed, parsed.root().get()).read(files, gases);
+        return new MachineDocument(text, parsed, parsed.root().get()).read(files);
     }
 
     /** The document of a text that is known to be a JSON object. */
@@ -59,8 +57,8 @@ public final class MachineDocument {
     }
 
     /** Reads the machine, or every fault. */
-    public Reading read(AttachedFiles files, GasNames gases) {
-        Checked checked = Checker.check(parsed, gases);
+    public Reading read(AttachedFiles files) {
+        Checked checked = Checker.check(parsed);
         Rules.judge(checked, files);
         List<Fault> faults =
                 checked.flawsInOrder().stream().map(MachineDocument::fault).toList();
@@ -153,28 +151,7 @@ public final class MachineDocument {
 
     /** Every number that the file holds and that can be read, in the order of the file. */
     public List<NumericKey> numericKeys() {
-        Checked checked = Checker.check(parsed, GasNames.ANY);
-        List<NumericKey> found = new ArrayList<>();
-        collectNumbers(root, KeyPath.ROOT, checked, found);
-        return found;
-    }
-
-    private static void collectNumbers(Node nest, KeyPath path, Checked checked, List<NumericKey> found) {
-        for (Node node : nest.members()) {
-            if (node.isRepeated()) {
-                continue;
-            }
-            KeyPath own = nest.type() == Node.Type.LIST ? path.item(node.place()) : path.key(node.name());
-            Key key = checked.key(node);
-            Quantity quantity = checked.quantity(node).orElse(null);
-            if (quantity != null && key != null) {
-                // a clearance is a share or a volume, as its unit says
-                Dimension dimension = key.dimension().orElse(Dimension.SHARE);
-                found.add(
-                        new NumericKey(own, dimension.holds(quantity.unit()) ? dimension : Dimension.VOLUME, quantity));
-            }
-            collectNumbers(node, own, checked, found);
-        }
+        return NumericKey.collect(root, Checker.check(parsed));
     }
 
     /**

@@ -17,7 +17,6 @@ import java.nio.file.StandardOpenOption;
 import java.nio.file.attribute.PosixFileAttributeView;
 import java.util.Set;
 import throwbench.solver.document.attached.AttachedFiles;
-import throwbench.solver.document.check.GasNames;
 import throwbench.solver.document.json.JsonText;
 
 /** Machine files on disk. */
@@ -31,11 +30,6 @@ public final class MachineFile {
 
     /** Reads a file, and the tables that it names; whatever is wrong with either is a fault. */
     public static Reading read(Path file) {
-        return read(file, GasNames.TABLE);
-    }
-
-    /** Reads a file whose mixtures may name these gases. */
-    public static Reading read(Path file, GasNames gases) {
         byte[] bytes;
         try {
             if (Files.isDirectory(file)) {
@@ -54,14 +48,14 @@ public final class MachineFile {
             String found = "more than " + JsonText.LARGEST + " bytes";
             return Reading.faulty(new Fault("", found, "a machine file of at most that"));
         }
-        return read(bytes, attachedTo(file), gases);
+        return read(bytes, attachedTo(file));
     }
 
-    private static Reading read(byte[] bytes, AttachedFiles attached, GasNames gases) {
+    private static Reading read(byte[] bytes, AttachedFiles attached) {
         CharsetDecoder strict = StandardCharsets.UTF_8.newDecoder();
         ByteBuffer rest = ByteBuffer.wrap(bytes);
         try {
-            return MachineDocument.read(strict.decode(rest).toString(), attached, gases);
+            return MachineDocument.read(strict.decode(rest).toString(), attached);
         } catch (CharacterCodingException foreign) {
             return Reading.faulty(new Fault("", "bytes that are no UTF-8, from byte " + rest.position(), "UTF-8"));
         }

@@ -70,10 +70,26 @@ public final class BreakAngles {
 
     /** Those of a throw and the joints of its pressure curves: what an integral over the revolution is split at. */
     static double[] forIntegrals(RunningMachine running, int throwIndex) {
-        DoubleStream joints = running.throwsInOrder().get(throwIndex).curves().stream()
+        if (!running.speedCurve().constant()) {
+            return forMachineIntegrals(running, throwIndex);
+        }
+        return sorted(DoubleStream.concat(stream(own(running, throwIndex)), joints(running, throwIndex)));
+    }
+
+    /** The same of all throws, in the crank angle of one of them. */
+    static double[] forMachineIntegrals(RunningMachine running, int shown) {
+        DoubleStream all = stream(ofMachine(running, shown));
+        for (int i = 0; i < running.throwsInOrder().size(); i++) {
+            double shift = running.angleBetween(shown, i);
+            all = DoubleStream.concat(all, joints(running, i).map(angle -> Angles.wrap(angle - shift)));
+        }
+        return sorted(all);
+    }
+
+    private static DoubleStream joints(RunningMachine running, int throwIndex) {
+        return running.throwsInOrder().get(throwIndex).curves().stream()
                 .map(PressureCurve::joints)
                 .flatMapToDouble(Arrays::stream);
-        return sorted(DoubleStream.concat(stream(ofThrow(running, throwIndex)), joints));
     }
 
     /** Where the guide force changes its sign, |N| and with it the guide's friction bend. */

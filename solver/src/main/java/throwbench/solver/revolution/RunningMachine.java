@@ -14,6 +14,7 @@ import throwbench.solver.mechanism.Rotation;
  * A machine settled at one duty point: every chamber's cycle is solved and the speed is known. What depends on an angle is
  * read from it by a {@link Revolution} or an {@link Instant}.
  *
+ * @param dutyPoint with every balanced interstage pressure found
  * @param throwsInOrder one for each throw of the machine
  * @param speedCurve ω and α over the crank angle of the first throw
  */
@@ -27,15 +28,19 @@ public record RunningMachine(
     /** Settles a machine at a duty point, or says for every place why it cannot. */
     public static Settling settle(Machine machine, DutyPoint dutyPoint) {
         List<Refusal> refusals = new ArrayList<>();
+        DutyPoint settled = InterstageBalance.settle(machine, dutyPoint, refusals);
         List<RunningThrow> running = new ArrayList<>();
+        if (!refusals.isEmpty()) {
+            return new Settling(Optional.empty(), List.copyOf(refusals));
+        }
         for (int i = 0; i < machine.throwsInOrder().size(); i++) {
-            new ThrowSettler(machine, dutyPoint, i, refusals).settle().ifPresent(running::add);
+            new ThrowSettler(machine, settled, i, refusals).settle().ifPresent(running::add);
         }
         if (!refusals.isEmpty()) {
             return new Settling(Optional.empty(), List.copyOf(refusals));
         }
         SpeedCurve steady = SpeedCurve.constant(dutyPoint.speed());
-        return VaryingSpeed.settle(new RunningMachine(machine, dutyPoint, running, steady));
+        return VaryingSpeed.settle(new RunningMachine(machine, settled, running, steady));
     }
 
     /** The same machine with another speed over the turn. */

@@ -16,6 +16,7 @@ import throwbench.solver.machine.Throw;
  * @param pressures the same of every chamber of the throw, Pa absolute
  * @param throwFlow what the shown throw takes and passes, by stage
  * @param machineFlow the same of the whole machine
+ * @param harmonics of torques, shaking forces and couples, phases from the first throw's head-end dead centre
  * @param notes what a user must be told, in sentences
  */
 public record Summary(
@@ -27,6 +28,7 @@ public record Summary(
         double meanShaftTorque,
         StageFlows throwFlow,
         StageFlows machineFlow,
+        MachineHarmonics harmonics,
         List<String> notes) {
 
     /**
@@ -69,6 +71,7 @@ public record Summary(
                 means.stream().mapToDouble(TurnMeans::torque).sum(),
                 flows(running, shown, means.get(shown)),
                 machineFlows(running, means),
+                MachineHarmonics.of(running),
                 Notes.of(running, shown));
     }
 

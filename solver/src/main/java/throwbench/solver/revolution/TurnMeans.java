@@ -3,8 +3,7 @@ package throwbench.solver.revolution;
 import java.util.Map;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
-import org.apache.commons.math3.analysis.integration.gauss.GaussIntegrator;
-import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactory;
+import throwbench.solver.balance.TurnQuadrature;
 import throwbench.solver.chamber.ChamberVolume;
 import throwbench.solver.chamber.PressureCurve;
 import throwbench.solver.chamber.Side;
@@ -18,15 +17,8 @@ import throwbench.solver.mechanism.Approach;
  */
 final class TurnMeans {
 
-    /** Points a piece; pieces are at most a twelfth of a turn, over which every quantity is analytic. */
-    private static final int POINTS = 12;
-
+    /** On it every quantity is analytic. */
     private static final double LONGEST_PIECE = Angles.TURN / 12;
-
-    /** Between the many rows of a recorded pressure fewer points are as exact. */
-    private static final int SHORT_POINTS = 5;
-
-    private static final double SHORT_PIECE = Angles.TURN / 72;
 
     private final RunningThrow running;
     private final double meanSpeed;
@@ -38,36 +30,22 @@ final class TurnMeans {
         this.running = machine.throwsInOrder().get(index);
         this.meanSpeed = machine.meanSpeed();
         this.chamberPower = new double[running.chambers().size()];
-        integrate(new ThrowInstant(machine, index), BreakAngles.forIntegrals(machine, index));
+        ThrowInstant instant = new ThrowInstant(machine, index);
+        TurnQuadrature.over(
+                BreakAngles.forIntegrals(machine, index),
+                LONGEST_PIECE,
+                (angle, weight) -> add(instant, angle, weight / Angles.TURN));
     }
 
-    private void integrate(ThrowInstant instant, double[] breaks) {
-        GaussIntegratorFactory rules = new GaussIntegratorFactory();
-        for (int i = 0; i < breaks.length; i++) {
-            double from = breaks[i];
-            double to = i + 1 < breaks.length ? breaks[i + 1] : breaks[0] + Angles.TURN;
-            int pieces = (int) Math.ceil((to - from) / LONGEST_PIECE);
-            double length = (to - from) / pieces;
-            int points = length > SHORT_PIECE ? POINTS : SHORT_POINTS;
-            for (int k = 0; k < pieces; k++) {
-                double left = from + k * length;
-                add(rules.legendre(points, left, left + length), instant);
-            }
-        }
-    }
-
-    private void add(GaussIntegrator rule, ThrowInstant instant) {
-        for (int i = 0; i < rule.getNumberOfPoints(); i++) {
-            double weight = rule.getWeight(i) / Angles.TURN;
-            instant.turnTo(rule.getPoint(i), Approach.JUST_AFTER);
-            torque += weight * instant.at(Column.THROW_TORQUE);
-            // power is the work of a turn times turns a second, whatever the speed within the turn: ∮ p dV by the angle
-            double speed = instant.at(Column.VELOCITY) * meanSpeed / instant.speed();
-            for (int c = 0; c < chamberPower.length; c++) {
-                ChamberVolume volume = running.volumes().get(c);
-                double growth = volume.side() == Side.HEAD ? volume.area() * speed : -volume.area() * speed;
-                chamberPower[c] -= weight * instant.pressure(c) * growth;
-            }
+    private void add(ThrowInstant instant, double angle, double weight) {
+        instant.turnTo(angle, Approach.JUST_AFTER);
+        torque += weight * instant.at(Column.THROW_TORQUE);
+        // power is the work of a turn times turns a second, whatever the speed within the turn: ∮ p dV by the angle
+        double speed = instant.at(Column.VELOCITY) * meanSpeed / instant.speed();
+        for (int c = 0; c < chamberPower.length; c++) {
+            ChamberVolume volume = running.volumes().get(c);
+            double growth = volume.side() == Side.HEAD ? volume.area() * speed : -volume.area() * speed;
+            chamberPower[c] -= weight * instant.pressure(c) * growth;
         }
     }
 

@@ -30,21 +30,18 @@ final class VaryingSpeed {
             String wanted = "a " + drive.driver().kind() + " driver needs a rotatingInertia above 0";
             return new Settling(Optional.empty(), List.of(new Refusal("drive.rotatingInertia", wanted)));
         }
-        SpeedOutcome outcome = solve(steady, drive.rotatingInertia().getAsDouble());
+        SpeedOutcome outcome =
+                solve(steady, drive.driver(), drive.rotatingInertia().getAsDouble());
         return outcome.curve().isPresent()
                 ? new Settling(Optional.of(steady.turning(outcome.curve().get())), List.of())
                 : new Settling(Optional.empty(), List.of(new Refusal("drive.rotatingInertia", outcome.refusal())));
     }
 
-    /** The speed with a rotating inertia (kg m², above 0) of the caller's. */
-    static SpeedOutcome solve(RunningMachine steady, double rotatingInertia) {
-        SpeedSolver solver = new SpeedSolver(
-                new MachineLoad(steady),
-                rotatingInertia,
-                steady.machine().drive().driver(),
-                steady.meanSpeed());
+    /** The speed with a driver and a rotating inertia (kg m², above 0) of the caller's. */
+    static SpeedOutcome solve(RunningMachine steady, Driver driver, double rotatingInertia) {
+        SpeedSolver solver = new SpeedSolver(new MachineLoad(steady), rotatingInertia, driver, steady.meanSpeed());
         SpeedCurve curve = steady.speedCurve();
-        double[] breaks = BreakAngles.ofMachine(steady, 0);
+        double[] breaks = BreakAngles.forMachineIntegrals(steady, 0);
         boolean stand = steady.throwsInOrder().stream()
                 .allMatch(t -> t.body().friction().guideCoefficient() == 0);
         for (int n = 0; n < MOST_ROUNDS && !stand; n++) {
@@ -53,7 +50,7 @@ final class VaryingSpeed {
                 return outcome;
             }
             curve = outcome.curve().get();
-            double[] moved = BreakAngles.ofMachine(steady.turning(curve), 0);
+            double[] moved = BreakAngles.forMachineIntegrals(steady.turning(curve), 0);
             stand = same(breaks, moved);
             breaks = moved;
         }

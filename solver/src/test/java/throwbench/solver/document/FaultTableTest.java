@@ -69,6 +69,31 @@ class FaultTableTest {
                 paths);
     }
 
+    // 1.03 bar · 1.05 = 1.0815 bar above 1.1 bar · 0.97 = 1.067 bar; 1.0 bar · 1.05 = 1.05 bar below it
+    @Test
+    void dischargePressureIsComparedInsideTheGasChamberWithItsLosses() {
+        String edit = "dutyPoints[0].stages.high.suctionPressure = \"2 bar a\""
+                + " ; dutyPoints[0].stages.low.dischargePressure = ";
+        assertEquals(List.of(), Samples.read(edited(edit + "\"1.03 bar a\"")).faults());
+        assertEquals(
+                List.of("dutyPoints[0].stages.low.dischargePressure"),
+                Samples.read(edited(edit + "\"1.0 bar a\"")).faults().stream()
+                        .map(Fault::path)
+                        .toList());
+    }
+
+    // -0.35 bar + 0.4 bar = 0.05 bar above 0.2 bar - 0.2 bar = 0; -0.41 bar + 0.4 bar below it
+    @Test
+    void dischargePressureIsComparedInsideTheLiquidChamberWithItsLosses() {
+        String edit = "dutyPoints[0].stages.lift.dischargePressure = ";
+        assertEquals(List.of(), Samples.read(edited(edit + "\"-0.35 bar g\"")).faults());
+        assertEquals(
+                List.of("dutyPoints[0].stages.lift.dischargePressure"),
+                Samples.read(edited(edit + "\"-0.41 bar g\"")).faults().stream()
+                        .map(Fault::path)
+                        .toList());
+    }
+
     @Test
     void repeatedKeyIsAFaultAtItsPathAndTheFirstOneCounts() {
         String text = Samples.pageExample()

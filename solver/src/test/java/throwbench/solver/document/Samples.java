@@ -7,7 +7,6 @@ import java.util.Map;
 import java.util.Objects;
 import java.util.Scanner;
 import throwbench.solver.document.attached.AttachedFiles;
-import throwbench.solver.document.check.GasNames;
 import throwbench.solver.machine.Machine;
 
 /** The machine files of these tests. */
@@ -53,11 +52,11 @@ final class Samples {
     }
 
     static Reading read(String text) {
-        return MachineDocument.read(text, TABLES, GasNames.ANY);
+        return MachineDocument.read(text, TABLES);
     }
 
     static Reading read(MachineDocument document) {
-        return document.read(TABLES, GasNames.ANY);
+        return document.read(TABLES);
     }
 
     static MachineDocument document(String text) {

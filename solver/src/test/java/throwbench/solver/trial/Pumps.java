@@ -132,7 +132,7 @@ public final class Pumps {
                 Limits.NONE);
     }
 
-    /** @param clearance a share of the swept volume */
+    /** A chamber of the one stage; its clearance is a share of the swept volume. */
     public static Chamber chamber(String name, Side side, double bore, double inner, double clearance, Cycle cycle) {
         return new Chamber(
                 name, side, Optional.of(STAGE), bore, inner, new Clearance(clearance, true), cycle, 0, Limits.NONE);

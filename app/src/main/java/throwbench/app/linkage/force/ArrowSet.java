@@ -6,6 +6,7 @@ import java.util.Set;
 import throwbench.app.linkage.parts.GearShape;
 import throwbench.app.linkage.parts.Pose;
 import throwbench.app.linkage.parts.RodLine;
+import throwbench.app.linkage.parts.ThrowAxes;
 import throwbench.app.linkage.parts.ThrowLayout;
 import throwbench.solver.machine.Chamber;
 import throwbench.solver.machine.Throw;
@@ -19,8 +20,11 @@ import throwbench.solver.revolution.Instant;
  */
 public final class ArrowSet {
 
-    /** Torque is shown as an arc about the crank centre that begins here, rad from the throw's x. */
-    public static final double ARC_START = Math.toRadians(128);
+    /** Torque is shown as an arc about the crank centre that begins here, rad from the throw's x to its upper side. */
+    private static final double ARC_START = Math.toRadians(128);
+
+    /** Where a gas arrow stands between what passes through the chamber (0) and its wall (1). */
+    private static final double GAS_LANE = 0.65;
 
     /** Points between what an arrow acts on and an arrow that runs beside it, at weight 1. */
     private static final double BESIDE = 13;
@@ -31,6 +35,7 @@ public final class ArrowSet {
     private final ThrowLayout layout;
     private final int throwIndex;
     private final double massCentre;
+    private final int upper;
     private final List<Arrow> arrows = new ArrayList<>();
     private final double[] lane;
     private final int[] piston;
@@ -44,6 +49,7 @@ public final class ArrowSet {
     public ArrowSet(Throw t, int throwIndex, ThrowLayout layout, Set<ForceKind> kinds, double weight) {
         this.layout = layout;
         this.throwIndex = throwIndex;
+        this.upper = ThrowAxes.upper(t.place().axisDirection());
         this.massCentre = t.connectingRod().massCentre(t.linkage().rodLength());
         for (ForceKind kind : ForceKind.values()) {
             if (kinds.contains(kind)) {
@@ -87,12 +93,12 @@ public final class ArrowSet {
         }
         switch (arrow.kind()) {
             case INERTIA -> {
-                lane[i] = outside;
-                besideY[i] = BESIDE * weight;
+                lane[i] = upper * outside;
+                besideY[i] = upper * BESIDE * weight;
             }
             case ROD -> {
-                lane[i] = -outside;
-                besideY[i] = -BESIDE * weight;
+                lane[i] = -upper * outside;
+                besideY[i] = -upper * BESIDE * weight;
             }
             case GAS -> layGas(t.chambers().get(arrow.chamber()), i);
             default -> {}
@@ -108,9 +114,14 @@ public final class ArrowSet {
                     || p.headChamber().filter(x -> x == c).isPresent()) {
                 piston[i] = k;
                 double free = chamber.innerDiameter() > 0 ? chamber.innerDiameter() / 2 : 0;
-                lane[i] = p.plunger() ? 0 : -(free + chamber.bore() / 2) / 2;
+                lane[i] = p.plunger() ? 0 : -upper * (free + GAS_LANE * (chamber.bore() / 2 - free));
             }
         }
+    }
+
+    /** Where the torque's arc begins, rad counter-clockwise from the throw's x. */
+    public double arcStart() {
+        return upper * ARC_START;
     }
 
     public List<Arrow> arrows() {

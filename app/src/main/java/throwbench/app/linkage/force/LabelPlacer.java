@@ -32,6 +32,9 @@ public final class LabelPlacer {
     /** Distance of the places tried, points at weight 1. */
     private static final double STEP = 5;
 
+    /** A label moves only to a place that is better by so many points. */
+    private static final double STAY = 60;
+
     private final Occupancy occupancy;
     private final Box room;
     private final double apart;
@@ -50,18 +53,29 @@ public final class LabelPlacer {
         placed.add(box);
     }
 
-    /** Places a label of a size as near as can be to a point; empty where there is no room at all. */
-    public Optional<Box> place(double nearX, double nearY, double width, double height) {
+    /**
+     * Places a label of a size as near as can be to a point; empty where there is no room at all.
+     *
+     * @param before where it stood until now: it stays there unless another place is clearly better
+     */
+    public Optional<Box> place(double nearX, double nearY, double width, double height, Optional<Box> before) {
         Box best = null;
         double least = Double.POSITIVE_INFINITY;
+        if (before.isPresent()) {
+            Box old = new Box(before.get().x(), before.get().y(), width, height);
+            if (old.within(room) && isFree(old.x(), old.y(), width, height)) {
+                best = old;
+                least = cost(old.x() + width / 2 - nearX, old.y() + height / 2 - nearY, width) - STAY;
+                least += CROWD * occupancy.share(old.x() - 2, old.y() - 2, width + 4, height + 4);
+            }
+        }
         double startX = room.x();
         double startY = room.y();
         for (double y = startY; y + height <= room.y() + room.height(); y += step) {
             for (double x = startX; x + width <= room.x() + room.width(); x += step) {
                 double dx = x + width / 2 - nearX;
                 double dy = y + height / 2 - nearY;
-                // a label is wide: standing above or below is nearer than standing beside
-                double cost = Math.hypot(Math.max(0, Math.abs(dx) - width / 4), dy);
+                double cost = cost(dx, dy, width);
                 if (cost < least) {
                     cost += CROWD * occupancy.share(x - 2, y - 2, width + 4, height + 4);
                     if (cost < least && isFree(x, y, width, height)) {
@@ -75,6 +89,11 @@ public final class LabelPlacer {
             placed.add(best);
         }
         return Optional.ofNullable(best);
+    }
+
+    /** A label is wide: standing above or below is nearer than standing beside. */
+    private static double cost(double dx, double dy, double width) {
+        return Math.hypot(Math.max(0, Math.abs(dx) - width / 4), dy);
     }
 
     private boolean isFree(double x, double y, double width, double height) {

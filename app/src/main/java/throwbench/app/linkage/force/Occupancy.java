@@ -3,25 +3,25 @@ package throwbench.app.linkage.force;
 /** What of a drawing is taken at some angle of the revolution, on a grid; tells how crowded a rectangle is. */
 public final class Occupancy {
 
-    /** Side of a cell, points. */
-    static final double CELL = 5;
-
+    private final double cell;
     private final int columns;
     private final int rows;
     private final float[] taken;
     private final double[] sums;
 
-    public Occupancy(double width, double height) {
-        columns = Math.max(1, (int) Math.ceil(width / CELL));
-        rows = Math.max(1, (int) Math.ceil(height / CELL));
+    /** @param cell side of a cell, points */
+    public Occupancy(double width, double height, double cell) {
+        this.cell = cell;
+        columns = Math.max(1, (int) Math.ceil(width / cell));
+        rows = Math.max(1, (int) Math.ceil(height / cell));
         taken = new float[columns * rows];
         sums = new double[(columns + 1) * (rows + 1)];
     }
 
     /** Takes the cell of a point; a cell keeps its greatest weight. */
     public void mark(double x, double y, double weight) {
-        int c = (int) Math.floor(x / CELL);
-        int r = (int) Math.floor(y / CELL);
+        int c = (int) Math.floor(x / cell);
+        int r = (int) Math.floor(y / cell);
         if (c >= 0 && r >= 0 && c < columns && r < rows) {
             int i = r * columns + c;
             taken[i] = Math.max(taken[i], (float) weight);
@@ -55,8 +55,8 @@ public final class Occupancy {
     }
 
     // a drawing zoomed far in runs far out of the view: the grid is all that counts
-    private static int steps(double length) {
-        return (int) Math.max(1, Math.min(4000, Math.ceil(length / (0.7 * CELL))));
+    private int steps(double length) {
+        return (int) Math.max(1, Math.min(4000, Math.ceil(length / (0.7 * cell))));
     }
 
     /** Sums up; to be called after the last mark. */
@@ -73,10 +73,10 @@ public final class Occupancy {
 
     /** Mean weight in a rectangle. */
     public double share(double x, double y, double width, double height) {
-        int c1 = clamp((int) Math.floor(x / CELL), columns);
-        int r1 = clamp((int) Math.floor(y / CELL), rows);
-        int c2 = clamp((int) Math.ceil((x + width) / CELL), columns);
-        int r2 = clamp((int) Math.ceil((y + height) / CELL), rows);
+        int c1 = clamp((int) Math.floor(x / cell), columns);
+        int r1 = clamp((int) Math.floor(y / cell), rows);
+        int c2 = clamp((int) Math.ceil((x + width) / cell), columns);
+        int r2 = clamp((int) Math.ceil((y + height) / cell), rows);
         int cells = (c2 - c1) * (r2 - r1);
         if (cells == 0) {
             return 0;

@@ -21,7 +21,7 @@ public final class RunningNumber {
     /** The number alone, of an SI value. */
     public String of(double si) {
         long key = Math.round(readout.inUnit(si) * power);
-        int slot = (int) (Math.floorMod(key, (long) KEPT));
+        int slot = Math.floorMod(key, KEPT);
         String kept = texts[slot];
         if (kept != null && keys[slot] == key) {
             return kept;

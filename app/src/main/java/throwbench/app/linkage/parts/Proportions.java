@@ -69,7 +69,7 @@ final class Proportions {
         double margin = 0.1 * r;
         double from = linkage.leastReach() - half - margin;
         double to = linkage.greatestReach() + half + margin;
-        double halfHeight = Math.max(body + shoe, rodAt(from, rod) + margin / 2);
+        double halfHeight = Math.max(body + shoe, shankReach(linkage, rod, from) + margin / 2);
         return new GearShape.Slider(
                 false, half, half, halfHeight, shoe, new GearShape.Guide(from, to, 0.3 * rod.smallEye()));
     }
@@ -89,7 +89,7 @@ final class Proportions {
     }
 
     /** How far from the line of stroke the connecting rod's shank reaches where it passes a place x. */
-    private double rodAt(double x, GearShape.Rod rod) {
+    static double shankReach(Linkage linkage, GearShape.Rod rod, double x) {
         double most = 0;
         for (int i = 0; i < LOOKS; i++) {
             double theta = 2 * Math.PI * i / LOOKS;

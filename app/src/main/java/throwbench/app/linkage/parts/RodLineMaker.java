@@ -66,12 +66,18 @@ final class RodLineMaker {
         return new RodLine(pistons, barrels, bars);
     }
 
-    /** x beyond which a trunk piston's cylinder meets neither crank nor big end. */
+    /** x beyond which a trunk piston's cylinder meets neither crank nor connecting rod. */
     private double clearOfCrank(GearShape.Slider slider) {
         double sweep = gear.sweep(linkage.crankRadius());
         double side = slider.halfHeight() - Math.abs(linkage.guideOffset());
         double clear = side < sweep && side > -sweep ? Math.sqrt((sweep - side) * (sweep + side)) : 0;
-        return Math.max(inner - slider.back(), clear + 0.08 * linkage.crankRadius());
+        double from = Math.max(inner - slider.back(), clear + 0.08 * linkage.crankRadius());
+        // a slender cylinder begins where the connecting rod's shank fits into it
+        double last = outer - slider.back();
+        while (from < last && Proportions.shankReach(linkage, gear.rod(), from) > 0.96 * slider.halfHeight()) {
+            from += 0.02 * stroke;
+        }
+        return from;
     }
 
     private double neck(int i) {

@@ -16,6 +16,16 @@ public record ThrowAxes(double originX, double originY, double scale, double cos
         return new ThrowAxes(originX, originY, scale, Math.cos(axisDirection), Math.sin(axisDirection));
     }
 
+    /** +1 where the throw's y points up in the drawing or to its left, −1 where it points down: the side called upper. */
+    public static int upper(double axisDirection) {
+        return Math.cos(axisDirection) < -1e-9 ? -1 : 1;
+    }
+
+    /** The upper side of this throw. */
+    public int upper() {
+        return cos < -1e-9 ? -1 : 1;
+    }
+
     public double px(double x, double y) {
         return originX + scale * (cos * x - sin * y);
     }

@@ -16,28 +16,27 @@ import throwbench.solver.document.schema.Key;
 import throwbench.solver.document.schema.Kind;
 import throwbench.solver.document.schema.NameSpace;
 import throwbench.solver.document.schema.Schema;
+import throwbench.solver.fluid.GasTable;
 
 /** Walks a file's tree beside the schema: every value by itself, and every name. */
 public final class Checker {
 
     private final Checked checked;
     private final FlawList flaws;
-    private final GasNames gases;
     private final List<Reference> references = new ArrayList<>();
 
     private record Reference(Node at, String name, NameSpace space) {}
 
-    private Checker(Checked checked, GasNames gases) {
+    private Checker(Checked checked) {
         this.checked = checked;
         this.flaws = checked.flaws();
-        this.gases = gases;
     }
 
     /** Judges every value by itself; the flaws of the text as JSON are taken along. */
-    public static Checked check(Parsed parsed, GasNames gases) {
+    public static Checked check(Parsed parsed) {
         Node root = parsed.root().orElseThrow();
         Checked checked = new Checked(root, parsed.count(), ambientPressure(root));
-        Checker checker = new Checker(checked, gases);
+        Checker checker = new Checker(checked);
         parsed.flaws().forEach(checked.flaws()::add);
         checker.walk(Schema.root(), root);
         checker.references.forEach(checker::resolve);
@@ -242,8 +241,9 @@ public final class Checker {
 
     private void resolve(Reference reference) {
         NameSpace space = reference.space();
-        boolean known =
-                space == NameSpace.GAS ? gases.knows(reference.name()) : checked.isDeclared(space, reference.name());
+        boolean known = space == NameSpace.GAS
+                ? GasTable.find(reference.name()).isPresent()
+                : checked.isDeclared(space, reference.name());
         if (!known) {
             String found = "the unknown " + space.said() + ' ' + QuantityText.quoted(reference.name());
             flaws.add(reference.at(), found, "the name of a " + space.said());

@@ -3,11 +3,10 @@ package throwbench.solver.document.check;
 import throwbench.solver.document.json.Node;
 import throwbench.solver.document.quantity.NumberText;
 import throwbench.solver.document.quantity.Quantity;
+import throwbench.solver.fluid.GasMixture;
 
 /** A gas is given by its constants or by its parts, and the parts make a whole. */
 final class FluidRules {
-
-    private static final double SUM_TOLERANCE = 1e-6;
 
     private FluidRules() {}
 
@@ -49,7 +48,7 @@ final class FluidRules {
             }
             sum += fraction.value();
         }
-        boolean whole = Math.abs(sum - 1) <= SUM_TOLERANCE;
+        boolean whole = Math.abs(sum - 1) <= GasMixture.SUM_TOLERANCE;
         if (!whole) {
             fluid.fault("mixture", "fractions that sum to " + NumberText.write(sum, 9), "fractions that sum to 1");
         }

@@ -5,11 +5,13 @@ import java.io.OutputStream;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
+import throwbench.solver.balance.Harmonic;
 import throwbench.solver.chamber.ValveEvent;
 import throwbench.solver.machine.Chamber;
 import throwbench.solver.revolution.Column;
 import throwbench.solver.revolution.Extreme;
 import throwbench.solver.revolution.Extremes;
+import throwbench.solver.revolution.MachineHarmonics;
 import throwbench.solver.revolution.Reversal;
 import throwbench.solver.revolution.Revolution;
 import throwbench.solver.revolution.RunningThrow;
@@ -70,6 +72,7 @@ public final class RevolutionJson implements Written {
         json.number("meanThrowTorque_N_m", summary.meanThrowTorque());
         json.number("meanShaftTorque_N_m", summary.meanShaftTorque());
         json.number("speedFluctuation", summary.speedFluctuation());
+        writeHarmonics(json);
         json.begin("machine");
         json.number("indicatedPower_W", summary.machineFlow().totalPower());
         json.optionalNumbers("capacity_kg_s", summary.machineFlow().capacity());
@@ -168,6 +171,32 @@ public final class RevolutionJson implements Written {
             json.endList();
         }
         json.end();
+    }
+
+    private void writeHarmonics(Json json) throws IOException {
+        MachineHarmonics harmonics = summary.harmonics();
+        json.begin("harmonics");
+        int shown = summary.revolution().shownThrow();
+        writeHarmonics(json, Column.THROW_TORQUE, harmonics.throwTorques().get(shown));
+        writeHarmonics(json, Column.SHAFT_TORQUE, harmonics.shaftTorque());
+        writeHarmonics(json, Column.SHAKING_FORCE_X, harmonics.forceX());
+        writeHarmonics(json, Column.SHAKING_FORCE_Y, harmonics.forceY());
+        writeHarmonics(json, Column.SHAKING_COUPLE_X, harmonics.coupleX());
+        writeHarmonics(json, Column.SHAKING_COUPLE_Y, harmonics.coupleY());
+        json.end();
+    }
+
+    private static void writeHarmonics(Json json, Column column, List<Harmonic> orders) throws IOException {
+        json.beginList(column.fileName());
+        for (Harmonic harmonic : orders) {
+            json.begin();
+            json.whole("order", harmonic.order());
+            json.number("cos", harmonic.cos());
+            json.number("sin", harmonic.sin());
+            json.number("amplitude", harmonic.amplitude());
+            json.end();
+        }
+        json.endList();
     }
 
     /** The summary's own, and why a number of this file is null. */
