@@ -1,6 +1,7 @@
 package throwbench.app.bench;
 
 import java.util.List;
+import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.quantity.UnitSystem;
 import throwbench.solver.finding.Finding;
 import throwbench.solver.machine.Machine;
@@ -12,15 +13,24 @@ import throwbench.solver.revolution.Summary;
 /**
  * One consistent state of the bench: every view draws from it and from nothing else. Immutable.
  *
+ * @param document the text that describes the machine
  * @param machine as last valid
  * @param dutyIndex the duty point shown
  * @param throwIndex the throw shown
  * @param summary extremes, reversal and stations of the shown throw at that duty point
  * @param findings of every duty point, worst first
  * @param units in which values are shown
+ * @param solveMillis how long solving the shown duty point took, ms
  */
 public record Shown(
-        Machine machine, int dutyIndex, int throwIndex, Summary summary, List<Finding> findings, UnitSystem units) {
+        MachineDocument document,
+        Machine machine,
+        int dutyIndex,
+        int throwIndex,
+        Summary summary,
+        List<Finding> findings,
+        UnitSystem units,
+        double solveMillis) {
 
     public Shown {
         findings = List.copyOf(findings);

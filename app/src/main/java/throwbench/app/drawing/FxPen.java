@@ -31,6 +31,17 @@ public final class FxPen implements Pen {
         g.setLineJoin(StrokeLineJoin.ROUND);
     }
 
+    /** Takes everything off a canvas of this size and lets the origin be its corner again. */
+    public void clear(double width, double height) {
+        g.setTransform(1, 0, 0, 1, 0, 0);
+        g.clearRect(0, 0, width, height);
+    }
+
+    /** Moves the origin: a canvas may show only a part of a drawing. */
+    public void from(double x, double y) {
+        g.setTransform(1, 0, 0, 1, x, y);
+    }
+
     private Color colour(int rgb) {
         return colours.computeIfAbsent(rgb, c -> Color.rgb(c >> 16 & 255, c >> 8 & 255, c & 255));
     }

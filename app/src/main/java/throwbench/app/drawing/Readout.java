@@ -12,8 +12,8 @@ import throwbench.solver.revolution.Column;
  */
 public final class Readout {
 
-    /** The sign for negative numbers: as wide as a plus, unlike the hyphen. */
-    private static final char MINUS = '\u2212';
+    /** The sign for negative numbers: an en dash, longer than the hyphen; the bundled font has no U+2212. */
+    private static final char MINUS = '\u2013';
 
     private static final double FEET = 0.3048;
 

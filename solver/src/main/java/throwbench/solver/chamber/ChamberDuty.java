@@ -8,6 +8,7 @@ import throwbench.solver.mechanism.Rotation;
 /**
  * All that a cycle needs to be solved.
  *
+ * @param volume with a clearance above 0
  * @param meanSpeed of the shaft, rad/s: cycles run at the constant mean speed
  * @param flowAllowance share of the capacity lost to heating, leakage and slip
  * @param accuracy how closely an integrated cycle is followed
@@ -22,6 +23,12 @@ public record ChamberDuty(
         double meanSpeed,
         double flowAllowance,
         CycleAccuracy accuracy) {
+
+    public ChamberDuty {
+        if (!(volume.clearance() > 0)) {
+            throw new IllegalArgumentException("a cycle needs a clearance above 0, not " + volume.clearance() + " m3");
+        }
+    }
 
     /** To be solved with full accuracy. */
     public ChamberDuty(

@@ -5,12 +5,13 @@ package throwbench.solver.chamber;
  *
  * @param area A, m², above 0
  * @param stroke m, above 0
- * @param clearance volume left at its dead centre, open pockets included, m³, above 0
+ * @param clearance volume left at its dead centre, open pockets included, m³, ≥ 0; 0 stands for not known, beside a
+ *     recorded pressure, which needs none
  */
 public record ChamberVolume(Side side, double area, double stroke, double clearance) {
 
     public ChamberVolume {
-        if (!(area > 0 && stroke > 0 && clearance > 0)) {
+        if (!(area > 0 && stroke > 0 && clearance >= 0)) {
             throw new IllegalArgumentException(
                     "chamber of area " + area + " m2, stroke " + stroke + " m, clearance " + clearance + " m3");
         }

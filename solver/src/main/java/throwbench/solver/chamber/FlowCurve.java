@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import throwbench.solver.chamber.flow.FlowSteps;
+import throwbench.solver.mechanism.Angles;
 import throwbench.solver.mechanism.Strokes;
 
 /** The solved cycle of a chamber behind flowing valves: cubics over the steps while gas passes, isentropes while shut. */
@@ -64,6 +65,15 @@ final class FlowCurve implements PressureCurve {
     @Override
     public List<ValveEvent> events() {
         return events;
+    }
+
+    @Override
+    public double[] joints() {
+        return open.stream()
+                .flatMapToDouble(FlowSteps::joints)
+                .map(Angles::wrap)
+                .sorted()
+                .toArray();
     }
 
     @Override

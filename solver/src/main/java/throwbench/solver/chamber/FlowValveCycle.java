@@ -4,6 +4,9 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import throwbench.solver.fluid.Answer;
+import throwbench.solver.fluid.Fluid;
+import throwbench.solver.fluid.GasMixture;
 import throwbench.solver.fluid.PerfectGas;
 
 /** Solves the cycle of a chamber behind flowing valves: which scheme it needs, and what cannot be solved. */
@@ -23,14 +26,24 @@ final class FlowValveCycle {
     private FlowValveCycle() {}
 
     static CycleOutcome solve(FlowValves valves, ChamberDuty duty) {
-        if (!(duty.fluid() instanceof PerfectGas gas)) {
-            return CycleOutcome.refused("valve flow needs a perfect gas, of molarMass and isentropicExponent");
+        if (!duty.fluid().isGas()) {
+            return CycleOutcome.refused("valves of a flow area pass gas, and the stage's fluid is a liquid");
         }
         OptionalDouble temperature = duty.lines().suctionTemperature();
         if (temperature.isEmpty()) {
             return CycleOutcome.refused("valve flow needs the stage's suctionTemperature at the duty point");
         }
-        return solve(valves, duty, gas, temperature.getAsDouble(), MOST_TURNS);
+        Answer<PerfectGas> gas = gas(duty.fluid(), temperature.getAsDouble());
+        return gas.value().isPresent()
+                ? solve(valves, duty, gas.value().get(), temperature.getAsDouble(), MOST_TURNS)
+                : CycleOutcome.refused(gas.reason());
+    }
+
+    private static Answer<PerfectGas> gas(Fluid fluid, double suctionTemperature) {
+        if (fluid instanceof GasMixture mixture) {
+            return mixture.perfectAt(suctionTemperature);
+        }
+        return fluid instanceof PerfectGas gas ? Answer.of(gas) : Answer.none("valve flow needs a gas");
     }
 
     static CycleOutcome solve(
@@ -68,6 +81,9 @@ final class FlowValveCycle {
         List<String> notes = new ArrayList<>();
         if (duty.flowAllowance() > 0) {
             notes.add("the flowAllowance is not taken off: the capacity of valve flow is its net suction flow");
+        }
+        if (duty.fluid() instanceof GasMixture mixture && mixture.real()) {
+            notes.add("valve flow stays on the perfect gas; the real model changes nothing here");
         }
         return notes;
     }

@@ -5,7 +5,7 @@ import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
-import throwbench.solver.fluid.PerfectGas;
+import throwbench.solver.fluid.Answer;
 import throwbench.solver.mechanism.Strokes;
 
 /**
@@ -20,6 +20,9 @@ final class IdealValveCycle implements PressureCurve {
         BREATHING,
         HELD_OPEN
     }
+
+    private static final String NO_TEMPERATURE =
+            "capacity by mass and discharge temperature need a suctionTemperature at the duty point";
 
     private final Way way;
     private final double low;
@@ -55,26 +58,36 @@ final class IdealValveCycle implements PressureCurve {
     }
 
     static CycleOutcome solve(IdealValves valves, ChamberDuty duty) {
-        if (!(duty.fluid() instanceof PerfectGas gas)) {
-            return CycleOutcome.refused(
-                    "gas mixtures are not solved by this version; give molarMass and isentropicExponent");
-        }
         LineConditions lines = duty.lines();
-        double nc = valves.compressionExponent().orElse(gas.isentropicExponent());
-        double ne = valves.expansionExponent().orElse(gas.isentropicExponent());
         double low = lines.suctionPressure() * (1 - valves.suctionLoss());
         double high = lines.dischargePressure() * (1 + valves.dischargeLoss());
         return switch (duty.condition().state()) {
             case HELD_OPEN -> CycleOutcome.solved(heldOpen(valves, lines));
             case WORKING -> {
-                double n = Math.min(nc, ne);
-                double reached =
-                        low * Math.pow(duty.volume().greatest() / duty.volume().least(), n);
-                yield CycleOutcome.solved(
-                        reached < high ? breathing(low, reached, n) : working(duty, gas, low, high, nc, ne));
+                Answer<LegGas> gas = LegGas.of(duty.fluid(), lines, low, high);
+                yield gas.value().isPresent()
+                        ? CycleOutcome.solved(legs(valves, duty, gas.value().get(), low, high))
+                        : CycleOutcome.refused(gas.reason());
             }
             case FAILED_SUCTION, FAILED_DISCHARGE -> CycleOutcome.refused("a failed valve needs the cycle valve-flow");
         };
+    }
+
+    private static IdealValveCycle legs(IdealValves valves, ChamberDuty duty, LegGas gas, double low, double high) {
+        double nc = valves.compressionExponent().orElse(gas.volumeExponent());
+        double ne = valves.expansionExponent().orElse(gas.volumeExponent());
+        double n = Math.min(nc, ne);
+        double reached = low * Math.pow(duty.volume().greatest() / duty.volume().least(), n);
+        return reached < high
+                ? breathing(low, reached, n)
+                : working(
+                        duty,
+                        gas,
+                        low,
+                        high,
+                        nc,
+                        ne,
+                        valves.compressionExponent().orElse(gas.temperatureExponent()));
     }
 
     private static IdealValveCycle heldOpen(IdealValves valves, LineConditions lines) {
@@ -96,7 +109,7 @@ final class IdealValveCycle implements PressureCurve {
     }
 
     private static IdealValveCycle working(
-            ChamberDuty duty, PerfectGas gas, double low, double high, double nc, double ne) {
+            ChamberDuty duty, LegGas gas, double low, double high, double nc, double ne, double nt) {
         ChamberVolume volume = duty.volume();
         double suctionOpens = volume.least() * Math.pow(high / low, 1 / ne);
         double dischargeOpens = volume.greatest() * Math.pow(low / high, 1 / nc);
@@ -112,13 +125,21 @@ final class IdealValveCycle implements PressureCurve {
         double inletVolume = drawn * low / duty.lines().suctionPressure();
         OptionalDouble temperature = duty.lines().suctionTemperature();
         OptionalDouble mass = temperature.isPresent()
-                ? OptionalDouble.of(low * drawn / (gas.gasConstant() * temperature.getAsDouble()))
+                ? OptionalDouble.of(
+                        low * drawn / (gas.compressibility() * gas.gasConstant() * temperature.getAsDouble()))
                 : OptionalDouble.empty();
         OptionalDouble discharged = temperature.isPresent()
-                ? OptionalDouble.of(temperature.getAsDouble() * Math.pow(high / low, (nc - 1) / nc))
+                ? OptionalDouble.of(temperature.getAsDouble() * Math.pow(high / low, (nt - 1) / nt))
                 : OptionalDouble.empty();
         return new IdealValveCycle(
-                Way.WORKING, low, high, nc, ne, List.copyOf(events), new Passed(inletVolume, mass, discharged), "");
+                Way.WORKING,
+                low,
+                high,
+                nc,
+                ne,
+                List.copyOf(events),
+                new Passed(inletVolume, mass, discharged),
+                temperature.isPresent() ? "" : NO_TEMPERATURE);
     }
 
     private static ValveEvent event(ValveEvent.Valve valve, boolean opens, double crankAngle) {

@@ -19,6 +19,6 @@ public record LiquidValves(double suctionLoss, double dischargeLoss, boolean los
 
     @Override
     public CycleOutcome solve(ChamberDuty duty) {
-        return CycleOutcome.refused("liquid cycles are not solved by this version; use ideal-valves");
+        return LiquidCycleSolver.solve(this, duty);
     }
 }

@@ -14,12 +14,25 @@ public interface PressureCurve {
     List<ValveEvent> events();
 
     /**
-     * Mass passed in a turn, kg; empty where a gas's suction temperature is not known. The flow allowance is taken off,
+     * The crank angles (rad, in [0, 2π)) at which its pieces join in value and slope. They are no breaks: a peak or a change
+     * of sign is found across them; but an integral is exact only when it is split there.
+     */
+    default double[] joints() {
+        return new double[0];
+    }
+
+    /** Whether it is known when the valves stand open and what they pass; of a measured pressure it is not. */
+    default boolean flowKnown() {
+        return true;
+    }
+
+    /**
+     * Mass passed in a turn, kg; empty where it is not known, which a note then explains. The flow allowance is taken off,
      * except from valve flow, where it is the net suction flow itself.
      */
     OptionalDouble massPerTurn();
 
-    /** The same at suction line conditions, m³; 0 when no valve opens. */
+    /** The same at suction line conditions, m³; 0 when no valve opens, and without meaning where the flow is not known. */
     double inletVolumePerTurn();
 
     /** Temperature of what is discharged, K, its mean by mass; empty where nothing is, or where it is not known. */

@@ -20,7 +20,7 @@ public enum Approach {
     }
 
     /** What is added to a crank angle before its stroke is told from a comparison, rad. */
-    double bias() {
+    public double bias() {
         return bias;
     }
 }

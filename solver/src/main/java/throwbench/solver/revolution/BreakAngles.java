@@ -1,50 +1,106 @@
 package throwbench.solver.revolution;
 
 import java.util.Arrays;
+import java.util.List;
+import java.util.stream.DoubleStream;
 import throwbench.solver.chamber.PressureCurve;
 import throwbench.solver.chamber.ValveEvent;
 import throwbench.solver.mechanism.Angles;
 import throwbench.solver.mechanism.Approach;
+import throwbench.solver.mechanism.Sweep;
 
 /**
- * The crank angles at which a curve may bend or step: dead centres and valve events. Between them every quantity is smooth.
+ * The crank angles at which a curve may bend or step: dead centres, valve events and, with friction at the guide, where the
+ * crosshead changes its side of the guide. Between them every quantity is smooth.
  */
 public final class BreakAngles {
 
     private BreakAngles() {}
 
-    /** Those of one throw, in its own crank angle: rad, rising, in [0, 2π). */
+    /**
+     * Those of one throw's curves, in its own crank angle: rad, rising, in [0, 2π). Where the speed varies, every throw's
+     * events reach it through the shaft's acceleration.
+     */
     public static double[] ofThrow(RunningMachine running, int throwIndex) {
-        return sorted(collect(running, throwIndex, throwIndex, new double[0]));
+        return running.speedCurve().constant() ? own(running, throwIndex) : ofMachine(running, throwIndex);
+    }
+
+    private static double[] own(RunningMachine running, int throwIndex) {
+        double[] steps = steps(running, throwIndex);
+        boolean friction =
+                running.throwsInOrder().get(throwIndex).body().friction().guideCoefficient() != 0;
+        return friction ? sorted(DoubleStream.concat(stream(steps), guideChanges(running, throwIndex, steps))) : steps;
     }
 
     /** Those of all throws, in the crank angle of one of them. */
     public static double[] ofMachine(RunningMachine running, int shown) {
-        double[] all = new double[0];
+        DoubleStream all = DoubleStream.empty();
         for (int i = 0; i < running.throwsInOrder().size(); i++) {
-            all = collect(running, shown, i, all);
+            double shift = running.angleBetween(shown, i);
+            all = DoubleStream.concat(all, stream(own(running, i)).map(angle -> Angles.wrap(angle - shift)));
         }
         return sorted(all);
     }
 
-    private static double[] collect(RunningMachine running, int shown, int index, double[] before) {
-        RunningThrow t = running.throwsInOrder().get(index);
-        int events = t.curves().stream().mapToInt(c -> c.events().size()).sum();
-        double[] all = Arrays.copyOf(before, before.length + 2 + events);
-        int at = before.length;
-        double shift = running.angleBetween(shown, index);
-        all[at++] = Angles.wrap(-shift);
-        all[at++] = Angles.wrap(t.body().linkage().crankEndDeadCentre(running.rotation()) - shift);
-        for (PressureCurve curve : t.curves()) {
-            for (ValveEvent event : curve.events()) {
-                all[at++] = Angles.wrap(event.crankAngle() - shift);
-            }
-        }
-        return all;
+    /** Dead centres and valve events. */
+    private static double[] steps(RunningMachine running, int throwIndex) {
+        RunningThrow t = running.throwsInOrder().get(throwIndex);
+        DoubleStream deadCentres = DoubleStream.of(0, t.body().linkage().crankEndDeadCentre(running.rotation()));
+        DoubleStream events = t.curves().stream()
+                .map(PressureCurve::events)
+                .flatMap(List::stream)
+                .mapToDouble(ValveEvent::crankAngle);
+        return sorted(DoubleStream.concat(deadCentres, events));
     }
 
-    private static double[] sorted(double[] angles) {
-        Arrays.sort(angles);
+    /** Those of a throw and the joints of its pressure curves: what an integral over the revolution is split at. */
+    static double[] forIntegrals(RunningMachine running, int throwIndex) {
+        if (!running.speedCurve().constant()) {
+            return forMachineIntegrals(running, throwIndex);
+        }
+        return sorted(DoubleStream.concat(stream(own(running, throwIndex)), joints(running, throwIndex)));
+    }
+
+    /** The same of all throws, in the crank angle of one of them. */
+    static double[] forMachineIntegrals(RunningMachine running, int shown) {
+        DoubleStream all = stream(ofMachine(running, shown));
+        for (int i = 0; i < running.throwsInOrder().size(); i++) {
+            double shift = running.angleBetween(shown, i);
+            all = DoubleStream.concat(all, joints(running, i).map(angle -> Angles.wrap(angle - shift)));
+        }
+        return sorted(all);
+    }
+
+    private static DoubleStream joints(RunningMachine running, int throwIndex) {
+        return running.throwsInOrder().get(throwIndex).curves().stream()
+                .map(PressureCurve::joints)
+                .flatMapToDouble(Arrays::stream);
+    }
+
+    /** Where the guide force changes its sign, |N| and with it the guide's friction bend. */
+    private static DoubleStream guideChanges(RunningMachine running, int throwIndex, double[] steps) {
+        RunningThrow t = running.throwsInOrder().get(throwIndex);
+        Sweep sweep = Sweep.wholeTurn(t.body().linkage(), running.rotation(), 0, Trace.STATIONS);
+        ThrowStations stations =
+                new ThrowStations(t, sweep, running.machine().site().framePressure(), List.of());
+        double[] speed = new double[Trace.STATIONS];
+        double[] alpha = new double[Trace.STATIONS];
+        running.fillSpeed(throwIndex, sweep.crankAngle(), Approach.JUST_AFTER, speed, alpha);
+        stations.solve(speed, alpha);
+        ThrowInstant instant = new ThrowInstant(running, throwIndex);
+        Trace guide = new Trace(
+                (angle, side) -> instant.turnTo(angle, side).at(Column.GUIDE_FORCE),
+                stations.column(Column.GUIDE_FORCE),
+                steps);
+        return SignChanges.of(guide).stream().mapToDouble(SignChange::crankAngle);
+    }
+
+    private static DoubleStream stream(double[] angles) {
+        return Arrays.stream(angles);
+    }
+
+    private static double[] sorted(DoubleStream unsorted) {
+        double[] angles = unsorted.sorted().toArray();
         int kept = 0;
         for (double angle : angles) {
             // angles of two throws that mean the same instant differ by rounding; just below a turn is angle 0

@@ -42,7 +42,7 @@ public final class Instant {
         for (int i = 0; i < running.throwsInOrder().size(); i++) {
             stations.of(i).sweep().turnTo(crankAngle + running.angleBetween(shown, i), approach);
         }
-        stations.solve();
+        stations.solve(approach);
         return this;
     }
 
@@ -67,6 +67,11 @@ public final class Instant {
     /** A value of any throw at this instant. */
     public double at(int throwIndex, Column column) {
         return stations.column(throwIndex, column)[0];
+    }
+
+    /** α of the shaft, rad/s², positive when it gains speed. */
+    public double shaftAcceleration() {
+        return stations.alpha()[0];
     }
 
     /** Pressure in a chamber of a throw, Pa absolute. */

@@ -4,6 +4,7 @@ import java.util.Arrays;
 import java.util.List;
 import throwbench.solver.load.ThrowForces;
 import throwbench.solver.machine.ShaftPlace;
+import throwbench.solver.mechanism.Approach;
 
 /**
  * All throws at the same instants, and what they add up to: shaft torque, shaking forces and couples in machine axes. Whole
@@ -35,8 +36,15 @@ final class MachineStations {
         Arrays.fill(speed, running.meanSpeed());
     }
 
-    /** Fills every column of every throw and of the machine. */
-    void solve() {
+    /**
+     * Fills every column of every throw and of the machine.
+     *
+     * @param approach the side that the sweeps were turned to
+     */
+    void solve(Approach approach) {
+        if (!running.speedCurve().constant()) {
+            running.fillSpeed(0, throwStations[0].sweep().crankAngle(), approach, speed, alpha);
+        }
         for (ThrowStations t : throwStations) {
             t.solve(speed, alpha);
         }

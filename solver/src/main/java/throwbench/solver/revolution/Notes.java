@@ -26,10 +26,6 @@ final class Notes {
             for (String note : t.curves().get(c).notes()) {
                 notes.add(chamber.name() + ": " + note);
             }
-            if (t.curves().get(c).massPerTurn().isEmpty()) {
-                notes.add(chamber.name()
-                        + ": capacity by mass and discharge temperature need a suctionTemperature at the duty point");
-            }
         }
         return List.copyOf(notes);
     }

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import throwbench.solver.chamber.ChamberSweep;
 import throwbench.solver.mechanism.Angles;
+import throwbench.solver.mechanism.Approach;
 import throwbench.solver.mechanism.Sweep;
 
 /**
@@ -50,7 +51,7 @@ public final class Revolution {
                     new ThrowStations(t, sweep, running.machine().site().framePressure(), chambers));
         }
         MachineStations all = new MachineStations(running, throwStations);
-        all.solve();
+        all.solve(Approach.JUST_AFTER);
         return new Revolution(all, shown);
     }
 

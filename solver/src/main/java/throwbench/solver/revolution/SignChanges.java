@@ -19,13 +19,26 @@ final class SignChanges {
 
     private static final int MOST_EVALUATIONS = 200;
 
+    /** Share of the peak that is rounding: a touch of zero must not become a pair of changes by it. */
+    private static final double ROUNDING = 1e-12;
+
     private final Trace trace;
+    private final Turning tops;
+    private final Turning bottoms;
     private final List<SignChange> changes = new ArrayList<>();
+    private final double zero;
     private double lastAngle;
     private double lastValue;
 
     private SignChanges(Trace trace) {
         this.trace = trace;
+        this.tops = new Turning(trace, 1);
+        this.bottoms = new Turning(trace, -1);
+        double peak = 0;
+        for (int i = 0; i < trace.count(); i++) {
+            peak = Math.max(peak, Math.abs(trace.value(i)));
+        }
+        this.zero = ROUNDING * peak;
     }
 
     static List<SignChange> of(Trace trace) {
@@ -37,7 +50,7 @@ final class SignChanges {
 
     private void walk() {
         int first = 0;
-        while (first < trace.count() && trace.value(first) == 0) {
+        while (first < trace.count() && isZero(trace.value(first))) {
             first++;
         }
         if (first == trace.count()) {
@@ -45,7 +58,7 @@ final class SignChanges {
         }
         lastAngle = trace.angle(first);
         lastValue = trace.value(first);
-        for (int i = first + 1; i < trace.count(); i++) {
+        for (int i = first; i < trace.count(); i++) {
             Optional<Extreme> dip = dip(i);
             double angle = trace.angle(i);
             dip.filter(d -> d.crankAngle() < angle).ifPresent(d -> meet(d.crankAngle(), d.value()));
@@ -56,9 +69,13 @@ final class SignChanges {
         meet(trace.angle(first) + Angles.TURN, trace.value(first));
     }
 
+    private boolean isZero(double value) {
+        return Math.abs(value) <= zero;
+    }
+
     /** Takes in the next sample: a change lies between it and the last one that had a sign, if theirs differ. */
     private void meet(double angle, double value) {
-        if (value == 0) {
+        if (isZero(value)) {
             return;
         }
         if (value * lastValue < 0) {
@@ -68,17 +85,10 @@ final class SignChanges {
         lastValue = value;
     }
 
-    /** A sample nearest to zero between smooth neighbours may hide a short pair of changes: the extreme itself tells. */
+    /** A sample nearest to zero among smooth neighbours may hide a short pair of changes: the extreme itself tells. */
     private Optional<Extreme> dip(int i) {
-        if (i + 1 >= trace.count() || !trace.smooth(i - 1, i + 1)) {
-            return Optional.empty();
-        }
         double value = trace.value(i);
-        double sense = Math.signum(value);
-        double before = sense * (trace.value(i - 1) - value);
-        double after = sense * (trace.value(i + 1) - value);
-        boolean near = sense != 0 && before >= 0 && after >= 0 && sense * value < before + after;
-        return near ? Optional.of(Extremes.refine(trace, i)) : Optional.empty();
+        return isZero(value) ? Optional.empty() : (value > 0 ? bottoms : tops).beside(i, 0);
     }
 
     private double root(double from, double fromValue, double to, double toValue) {
@@ -95,6 +105,6 @@ final class SignChanges {
             return to;
         }
         return new BrentSolver(1e-15, ANGLE_ACCURACY, 0)
-                .solve(MOST_EVALUATIONS, x -> trace.curve().at(x, Approach.JUST_AFTER), from, to);
+                .solve(MOST_EVALUATIONS, x -> trace.curve().at(x, Turning.side(from, x, to)), from, to);
     }
 }

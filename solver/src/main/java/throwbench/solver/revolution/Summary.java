@@ -16,6 +16,7 @@ import throwbench.solver.machine.Throw;
  * @param pressures the same of every chamber of the throw, Pa absolute
  * @param throwFlow what the shown throw takes and passes, by stage
  * @param machineFlow the same of the whole machine
+ * @param harmonics of torques, shaking forces and couples, phases from the first throw's head-end dead centre
  * @param notes what a user must be told, in sentences
  */
 public record Summary(
@@ -27,20 +28,21 @@ public record Summary(
         double meanShaftTorque,
         StageFlows throwFlow,
         StageFlows machineFlow,
+        MachineHarmonics harmonics,
         List<String> notes) {
 
     /**
      * Power and flow by stage.
      *
      * @param indicatedPower W, positive when absorbed
-     * @param capacity kg/s; empty where a suction temperature is missing
-     * @param inletVolume m³/s at inlet conditions
+     * @param capacity kg/s; empty where a suction temperature is missing or a pressure is recorded
+     * @param inletVolume m³/s at inlet conditions; empty where a pressure is recorded
      * @param totalPower W, every chamber counted
      */
     public record StageFlows(
             Map<String, Double> indicatedPower,
             Map<String, OptionalDouble> capacity,
-            Map<String, Double> inletVolume,
+            Map<String, OptionalDouble> inletVolume,
             double totalPower) {}
 
     /** Sums up one throw; an earlier summary lends its geometry. */
@@ -56,16 +58,20 @@ public record Summary(
         for (int c = 0; c < running.throwsInOrder().get(shown).chambers().size(); c++) {
             pressures.add(Extremes.of(traces.pressure(c)));
         }
-        TurnMeans means = new TurnMeans(running, shown);
+        List<TurnMeans> means = new ArrayList<>();
+        for (int i = 0; i < running.throwsInOrder().size(); i++) {
+            means.add(new TurnMeans(running, i));
+        }
         return new Summary(
                 traces.revolution(),
                 extremes,
                 List.copyOf(pressures),
                 Reversal.of(Traces.rodLoad(traces.revolution())),
-                means.throwTorque(),
-                means.shaftTorque(),
-                flows(running, shown, means),
-                machineFlows(running, shown, means),
+                means.get(shown).torque(),
+                means.stream().mapToDouble(TurnMeans::torque).sum(),
+                flows(running, shown, means.get(shown)),
+                machineFlows(running, means),
+                MachineHarmonics.of(running),
                 Notes.of(running, shown));
     }
 
@@ -77,26 +83,18 @@ public record Summary(
                 means.power());
     }
 
-    private static StageFlows machineFlows(RunningMachine running, int shown, TurnMeans known) {
-        StageFlows sum = flows(running, shown, known);
-        for (int i = 0; i < running.throwsInOrder().size(); i++) {
-            if (i != shown) {
-                sum = add(sum, flows(running, i, new TurnMeans(running, i)));
-            }
+    private static StageFlows machineFlows(RunningMachine running, List<TurnMeans> means) {
+        StageFlows sum = flows(running, 0, means.get(0));
+        for (int i = 1; i < means.size(); i++) {
+            sum = add(sum, flows(running, i, means.get(i)));
         }
         return sum;
     }
 
     private static StageFlows add(StageFlows a, StageFlows b) {
         b.indicatedPower().forEach((stage, power) -> a.indicatedPower().merge(stage, power, Double::sum));
-        b.inletVolume().forEach((stage, volume) -> a.inletVolume().merge(stage, volume, Double::sum));
-        b.capacity().forEach((stage, mass) -> a.capacity()
-                .merge(
-                        stage,
-                        mass,
-                        (x, y) -> x.isPresent() && y.isPresent()
-                                ? OptionalDouble.of(x.getAsDouble() + y.getAsDouble())
-                                : OptionalDouble.empty()));
+        b.inletVolume().forEach((stage, volume) -> a.inletVolume().merge(stage, volume, TurnMeans::sum));
+        b.capacity().forEach((stage, mass) -> a.capacity().merge(stage, mass, TurnMeans::sum));
         return new StageFlows(a.indicatedPower(), a.capacity(), a.inletVolume(), a.totalPower() + b.totalPower());
     }
 
@@ -111,8 +109,7 @@ public record Summary(
 
     /** (ω_max − ω_min)/ω_mean. */
     public double speedFluctuation() {
-        Extremes speed = extremes(Column.SHAFT_SPEED);
-        return (speed.greatest().value() - speed.least().value()) / running().meanSpeed();
+        return running().speedCurve().fluctuation();
     }
 
     /** Extremes of a column. */

@@ -3,7 +3,6 @@ package throwbench.solver.revolution;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import throwbench.solver.chamber.ChamberCondition;
 import throwbench.solver.chamber.ChamberDuty;
 import throwbench.solver.chamber.ChamberVolume;
 import throwbench.solver.chamber.CycleOutcome;
@@ -41,9 +40,9 @@ final class ThrowSettler {
         double uncovered = 0;
         for (int i = 0; i < described.chambers().size(); i++) {
             Chamber chamber = described.chambers().get(i);
-            ChamberVolume volume = volume(chamber);
+            ChamberVolume volume = volume(duty, described, chamber);
             volumes.add(volume);
-            solve(i, chamber, volume).ifPresent(curves::add);
+            solve(i, chamber).ifPresent(curves::add);
             uncovered += chamber.side() == Side.HEAD ? chamber.area() : -chamber.area();
         }
         if (curves.size() < volumes.size()) {
@@ -60,43 +59,53 @@ final class ThrowSettler {
         return Optional.of(new RunningThrow(described, body, phase(), volumes, curves, uncovered));
     }
 
-    private ChamberVolume volume(Chamber chamber) {
-        double stroke = described.linkage().stroke();
+    private static ChamberVolume volume(DutyPoint duty, Throw t, Chamber chamber) {
+        double stroke = t.linkage().stroke();
         double swept = chamber.area() * stroke;
         double clearance = chamber.clearance().volume(swept)
                 + duty.condition(chamber.name()).addedClearance().volume(swept);
         return new ChamberVolume(chamber.side(), chamber.area(), stroke, clearance);
     }
 
-    private Optional<PressureCurve> solve(int chamberIndex, Chamber chamber, ChamberVolume volume) {
-        String path = "throws[" + index + "].chambers[" + chamberIndex + "].cycle.kind";
+    private Optional<PressureCurve> solve(int chamberIndex, Chamber chamber) {
+        String path = "throws[" + index + "].chambers[" + chamberIndex + "].cycle";
+        Optional<CycleOutcome> alone = chamber.cycle().solveAlone(duty.condition(chamber.name()));
+        if (alone.isPresent()) {
+            return taken(path, alone.get());
+        }
         if (chamber.stage().isEmpty()) {
-            return refuse(path, "chambers without a stage are not solved by this version");
+            return refuse(path, "a " + chamber.cycle().kind() + " cycle needs a stage");
         }
         String stage = chamber.stage().get();
         StageConditions lines = duty.stages().get(stage);
         if (lines == null
                 || lines.suctionPressure().isEmpty()
                 || lines.dischargePressure().isEmpty()) {
-            return refuse(
-                    "stages." + stage + ".follows",
-                    "balanced interstage pressures are not solved by this version; give them at the duty point");
+            return refuse("stages." + stage + ".follows", "its pressures are not known at this duty point");
         }
-        ChamberCondition condition = duty.condition(chamber.name());
-        CycleOutcome outcome = chamber.cycle()
+        LineConditions known = new LineConditions(
+                lines.suctionPressure().getAsDouble(),
+                lines.dischargePressure().getAsDouble(),
+                lines.suctionTemperature());
+        return taken(path, cycle(machine, duty, described, chamber, known));
+    }
+
+    private Optional<PressureCurve> taken(String path, CycleOutcome outcome) {
+        return outcome.curve().isPresent() ? outcome.curve() : refuse(path, outcome.refusal());
+    }
+
+    /** Solves the cycle of a chamber that has a stage, between its lines. */
+    static CycleOutcome cycle(Machine machine, DutyPoint duty, Throw t, Chamber chamber, LineConditions lines) {
+        return chamber.cycle()
                 .solve(new ChamberDuty(
-                        described.linkage(),
+                        t.linkage(),
                         machine.drive().rotation(),
-                        volume,
-                        machine.fluidOf(stage),
-                        new LineConditions(
-                                lines.suctionPressure().getAsDouble(),
-                                lines.dischargePressure().getAsDouble(),
-                                lines.suctionTemperature()),
-                        condition,
+                        volume(duty, t, chamber),
+                        machine.fluidOf(chamber.stage().orElseThrow()),
+                        lines,
+                        duty.condition(chamber.name()),
                         duty.speed(),
                         chamber.flowAllowance()));
-        return outcome.curve().isPresent() ? outcome.curve() : refuse(path, outcome.refusal());
     }
 
     private Optional<PressureCurve> refuse(String path, String sentence) {

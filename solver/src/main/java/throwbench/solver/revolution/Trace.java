@@ -1,5 +1,6 @@
 package throwbench.solver.revolution;
 
+import java.util.Arrays;
 import throwbench.solver.mechanism.Angles;
 import throwbench.solver.mechanism.Approach;
 
@@ -20,9 +21,13 @@ public final class Trace {
 
     /**
      * @param grid the curve at STATIONS equally spaced angles from 0
-     * @param breaks rad, rising, in [0, 2π)
+     * @param breaks rad, rising, in [0, 2π); the first is 0, the shown throw's dead centre, so that no stretch runs
+     *     through the seam
      */
     Trace(Curve curve, double[] grid, double[] breaks) {
+        if (breaks.length == 0 || breaks[0] != 0) {
+            throw new IllegalArgumentException("angle 0 is not among the breaks " + Arrays.toString(breaks));
+        }
         this.curve = curve;
         int size = grid.length + 2 * breaks.length + 1;
         angles = new double[size];
@@ -50,6 +55,19 @@ public final class Trace {
     }
 
     private final int count;
+
+    /**
+     * Samples a curve.
+     *
+     * @param breaks angles at which it may bend or step, rad, rising, in [0, 2π)
+     */
+    public static Trace of(Curve curve, double[] breaks) {
+        double[] grid = new double[STATIONS];
+        for (int i = 0; i < grid.length; i++) {
+            grid[i] = curve.at(i * (Angles.TURN / STATIONS), Approach.JUST_AFTER);
+        }
+        return new Trace(curve, grid, breaks);
+    }
 
     private int addBreak(int at, double angle, int passed) {
         int next = add(at, angle, curve.at(angle, Approach.JUST_BEFORE), passed);

@@ -3,92 +3,68 @@ package throwbench.solver.revolution;
 import java.util.Map;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
-import org.apache.commons.math3.analysis.integration.gauss.GaussIntegrator;
-import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactory;
+import throwbench.solver.balance.TurnQuadrature;
 import throwbench.solver.chamber.ChamberVolume;
+import throwbench.solver.chamber.PressureCurve;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.machine.Chamber;
 import throwbench.solver.mechanism.Angles;
+import throwbench.solver.mechanism.Approach;
 
 /**
- * Means over the revolution by Gauss–Legendre quadrature between the break angles, so that no kink or step spoils them:
+ * Means of one throw over the revolution by Gauss–Legendre quadrature between the break angles, so that no kink or step spoils them:
  * independent of the number of stations.
  */
 final class TurnMeans {
 
-    /** Points a piece; pieces are at most a twelfth of a turn, over which every quantity is analytic. */
-    private static final int POINTS = 12;
-
+    /** On it every quantity is analytic. */
     private static final double LONGEST_PIECE = Angles.TURN / 12;
 
-    private final RunningMachine running;
-    private final int shown;
-    private double throwTorque;
-    private double shaftTorque;
-    /** Mean power of each chamber of the shown throw, W, positive when the gas takes it up. */
+    private final RunningThrow running;
+    private final double meanSpeed;
+    private double torque;
+    /** Mean power of each chamber, W, positive when the gas takes it up. */
     private final double[] chamberPower;
 
-    TurnMeans(RunningMachine running, int shown) {
-        this.running = running;
-        this.shown = shown;
-        this.chamberPower =
-                new double[running.throwsInOrder().get(shown).chambers().size()];
-        integrate(BreakAngles.ofMachine(running, shown));
+    TurnMeans(RunningMachine machine, int index) {
+        this.running = machine.throwsInOrder().get(index);
+        this.meanSpeed = machine.meanSpeed();
+        this.chamberPower = new double[running.chambers().size()];
+        ThrowInstant instant = new ThrowInstant(machine, index);
+        TurnQuadrature.over(
+                BreakAngles.forIntegrals(machine, index),
+                LONGEST_PIECE,
+                (angle, weight) -> add(instant, angle, weight / Angles.TURN));
     }
 
-    private void integrate(double[] breaks) {
-        Instant instant = new Instant(running, shown);
-        GaussIntegratorFactory rules = new GaussIntegratorFactory();
-        for (int i = 0; i < breaks.length; i++) {
-            double from = breaks[i];
-            double to = i + 1 < breaks.length ? breaks[i + 1] : breaks[0] + Angles.TURN;
-            int pieces = (int) Math.ceil((to - from) / LONGEST_PIECE);
-            double length = (to - from) / pieces;
-            for (int k = 0; k < pieces; k++) {
-                double left = from + k * length;
-                add(rules.legendre(POINTS, left, left + length), instant);
-            }
+    private void add(ThrowInstant instant, double angle, double weight) {
+        instant.turnTo(angle, Approach.JUST_AFTER);
+        torque += weight * instant.at(Column.THROW_TORQUE);
+        // power is the work of a turn times turns a second, whatever the speed within the turn: ∮ p dV by the angle
+        double speed = instant.at(Column.VELOCITY) * meanSpeed / instant.speed();
+        for (int c = 0; c < chamberPower.length; c++) {
+            ChamberVolume volume = running.volumes().get(c);
+            double growth = volume.side() == Side.HEAD ? volume.area() * speed : -volume.area() * speed;
+            chamberPower[c] -= weight * instant.pressure(c) * growth;
         }
     }
 
-    private void add(GaussIntegrator rule, Instant instant) {
-        RunningThrow t = running.throwsInOrder().get(shown);
-        for (int i = 0; i < rule.getNumberOfPoints(); i++) {
-            double weight = rule.getWeight(i) / Angles.TURN;
-            instant.turnTo(rule.getPoint(i));
-            throwTorque += weight * instant.at(Column.THROW_TORQUE);
-            shaftTorque += weight * instant.at(Column.SHAFT_TORQUE);
-            double speed = instant.at(Column.VELOCITY);
-            for (int c = 0; c < chamberPower.length; c++) {
-                ChamberVolume volume = t.volumes().get(c);
-                double growth = volume.side() == Side.HEAD ? volume.area() * speed : -volume.area() * speed;
-                chamberPower[c] -= weight * instant.pressure(shown, c) * growth;
-            }
-        }
+    /** Mean torque of the throw, N·m. */
+    double torque() {
+        return torque;
     }
 
-    /** Mean torque of the shown throw, N·m. */
-    double throwTorque() {
-        return throwTorque;
-    }
-
-    /** Mean torque of the shaft, N·m. */
-    double shaftTorque() {
-        return shaftTorque;
-    }
-
-    /** Indicated power of the shown throw by stage, W, positive when the machine absorbs it; without the loose chambers. */
+    /** Indicated power by stage, W, positive when the machine absorbs it; without the loose chambers. */
     Map<String, Double> powerByStage() {
         Map<String, Double> byStage = new TreeMap<>();
-        RunningThrow t = running.throwsInOrder().get(shown);
         for (int c = 0; c < chamberPower.length; c++) {
             double power = chamberPower[c];
-            t.chambers().get(c).stage().ifPresent(stage -> byStage.merge(stage, power, Double::sum));
+            running.chambers().get(c).stage().ifPresent(stage -> byStage.merge(stage, power, Double::sum));
         }
         return byStage;
     }
 
-    /** Indicated power of the shown throw, W, every chamber counted. */
+    /** Indicated power, W, every chamber counted. */
     double power() {
         double sum = 0;
         for (double power : chamberPower) {
@@ -115,19 +91,23 @@ final class TurnMeans {
         return byStage;
     }
 
-    private static OptionalDouble sum(OptionalDouble a, OptionalDouble b) {
+    /** A sum is known when both parts are. */
+    static OptionalDouble sum(OptionalDouble a, OptionalDouble b) {
         return a.isPresent() && b.isPresent()
                 ? OptionalDouble.of(a.getAsDouble() + b.getAsDouble())
                 : OptionalDouble.empty();
     }
 
-    /** Volume flow of one throw by stage at inlet conditions, m³/s. */
-    static Map<String, Double> inletVolumeByStage(RunningMachine running, int index) {
-        Map<String, Double> byStage = new TreeMap<>();
+    /** Volume flow of one throw by stage at inlet conditions, m³/s; empty where a chamber's flow is not known. */
+    static Map<String, OptionalDouble> inletVolumeByStage(RunningMachine running, int index) {
+        Map<String, OptionalDouble> byStage = new TreeMap<>();
         RunningThrow t = running.throwsInOrder().get(index);
         for (int c = 0; c < t.chambers().size(); c++) {
-            double volume = t.curves().get(c).inletVolumePerTurn() * running.turnsPerSecond();
-            t.chambers().get(c).stage().ifPresent(stage -> byStage.merge(stage, volume, Double::sum));
+            PressureCurve curve = t.curves().get(c);
+            OptionalDouble volume = curve.flowKnown()
+                    ? OptionalDouble.of(curve.inletVolumePerTurn() * running.turnsPerSecond())
+                    : OptionalDouble.empty();
+            t.chambers().get(c).stage().ifPresent(stage -> byStage.merge(stage, volume, TurnMeans::sum));
         }
         return byStage;
     }

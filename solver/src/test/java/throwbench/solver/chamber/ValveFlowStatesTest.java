@@ -8,12 +8,15 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.stream.DoubleStream;
+import org.apache.commons.math3.analysis.integration.gauss.GaussIntegratorFactory;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.EnumSource;
 import throwbench.solver.fluid.Fluid;
 import throwbench.solver.fluid.GasMixture;
+import throwbench.solver.fluid.Liquid;
 import throwbench.solver.fluid.PerfectGas;
 import throwbench.solver.mechanism.Approach;
 import throwbench.solver.mechanism.Rotation;
@@ -171,8 +174,8 @@ class ValveFlowStatesTest {
         LineConditions cold = new LineConditions(5e5, 1.2e6, OptionalDouble.empty());
         refused("valve flow needs the stage's suctionTemperature at the duty point", with(duty, duty.fluid(), cold));
         refused(
-                "valve flow needs a perfect gas, of molarMass and isentropicExponent",
-                with(duty, new GasMixture(Map.of("methane", 1.0), false), duty.lines()));
+                "valves of a flow area pass gas, and the stage's fluid is a liquid",
+                with(duty, new Liquid(1000, 2.2e9, 2300), duty.lines()));
         refused(
                 "a failed valve needs a leakArea above 0",
                 FlowSample.A.duty(Side.HEAD, ChamberState.FAILED_SUCTION, 0));
@@ -183,6 +186,48 @@ class ValveFlowStatesTest {
         assertEquals(sentence, outcome.refusal());
         assertFalse(outcome.failed());
         assertTrue(outcome.curve().isEmpty());
+    }
+
+    @Test
+    void aMixtureFlowsAsThePerfectGasOfItsSuctionTemperature() {
+        ChamberDuty sample = FlowSample.A.duty(Side.HEAD);
+        GasMixture mixture = new GasMixture(Map.of("methane", 0.62, "carbon dioxide", 0.38), true);
+        PerfectGas gas = mixture.perfectAt(305.15).value().orElseThrow();
+        PressureCurve mixed = FlowSample.solved(FlowSample.A.valves(), with(sample, mixture, sample.lines()));
+        PressureCurve perfect = FlowSample.solved(FlowSample.A.valves(), with(sample, gas, sample.lines()));
+        assertEquals(perfect.massPerTurn(), mixed.massPerTurn());
+        assertEquals(perfect.dischargeTemperature(), mixed.dischargeTemperature());
+        assertEquals(
+                List.of("valve flow stays on the perfect gas; the real model changes nothing here"), mixed.notes());
+    }
+
+    @Test
+    void theJointsSplitAnIntegralWhereItCanBeDone() {
+        // the work by Gauss's rule between events and joints, and by very many stations
+        ChamberDuty duty = FlowSample.A.duty(Side.HEAD);
+        PressureCurve curve = FlowSample.solved(FlowSample.A.valves(), duty);
+        Sweep single = Sweep.single(duty.linkage(), duty.rotation());
+        ChamberSweep sweep = new ChamberSweep(single, duty.volume());
+        double[] breaks = DoubleStream.concat(
+                        DoubleStream.of(curve.joints()), curve.events().stream().mapToDouble(ValveEvent::crankAngle))
+                .sorted()
+                .toArray();
+        double work = 0;
+        double[] pressure = new double[1];
+        for (int i = 0; i < breaks.length; i++) {
+            double to = i + 1 < breaks.length ? breaks[i + 1] : breaks[0] + 2 * Math.PI;
+            if (to - breaks[i] < 1e-12) {
+                continue;
+            }
+            var rule = new GaussIntegratorFactory().legendre(12, breaks[i], to);
+            for (int j = 0; j < rule.getNumberOfPoints(); j++) {
+                single.turnTo(rule.getPoint(j), Approach.JUST_AFTER);
+                curve.fill(sweep, pressure);
+                work -= rule.getWeight(j) * pressure[0] * FlowSample.volumeSlope(duty, rule.getPoint(j));
+            }
+        }
+        double many = FlowSample.work(FlowSample.pressures(curve, duty, 72_000), duty);
+        assertEquals(many, work, 1e-6 * many);
     }
 
     @Test

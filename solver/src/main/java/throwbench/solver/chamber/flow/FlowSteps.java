@@ -1,11 +1,16 @@
 package throwbench.solver.chamber.flow;
 
 import java.util.Arrays;
+import java.util.stream.DoubleStream;
+import java.util.stream.IntStream;
 import throwbench.solver.mechanism.Angles;
 import throwbench.solver.mechanism.Sweep;
 
 /** Pressure over a stretch of crank angle, as cubic pieces through the ends of integration steps. Immutable. */
 public final class FlowSteps {
+
+    /** Steps grow slowly: over this many of them the pressure has one scale, and their own small joints don't matter. */
+    private static final int JOINED = 8;
 
     private final double[] angle;
     private final double[] pressure;
@@ -15,6 +20,11 @@ public final class FlowSteps {
         this.angle = angle;
         this.pressure = pressure;
         this.slope = slope;
+    }
+
+    /** Crank angles of step ends, rad, not wrapped: close enough together that the pressure between two is smooth. */
+    public DoubleStream joints() {
+        return IntStream.iterate(0, i -> i < angle.length, i -> i + JOINED).mapToDouble(i -> angle[i]);
     }
 
     /** Overwrites the pressure at the stations that lie on the stretch. */

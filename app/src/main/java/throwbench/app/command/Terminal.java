@@ -1,0 +1,65 @@
+package throwbench.app.command;
+
+import java.io.IOException;
+import java.io.OutputStream;
+import java.nio.charset.StandardCharsets;
+import throwbench.solver.document.result.Written;
+
+/** Standard output and standard error, both UTF-8. */
+public final class Terminal {
+
+    private final OutputStream out;
+    private final OutputStream err;
+
+    /** Neither stream is closed, and neither needs a buffer: whole texts are handed over. */
+    public Terminal(OutputStream out, OutputStream err) {
+        this.out = out;
+        this.err = err;
+    }
+
+    /** Says on standard error what is wrong where: {@code file: key.path: what}. */
+    void complain(String file, String path, String what) {
+        complain(file, path.isEmpty() ? what : path + ": " + what);
+    }
+
+    /** Says on standard error what is wrong with a file as a whole. */
+    void complain(String file, String what) {
+        warn(oneLine(file) + ": " + oneLine(what));
+    }
+
+    /** Says one line on standard error. */
+    void warn(String line) {
+        try {
+            err.write((line + "\n").getBytes(StandardCharsets.UTF_8));
+        } catch (IOException unheard) {
+            // nobody listens on standard error, and there is no third place to say so
+            return;
+        }
+    }
+
+    /** A line break in a name must not begin a complaint of its own. */
+    private static String oneLine(String text) {
+        return text.replace('\n', ' ').replace('\r', ' ');
+    }
+
+    /** Writes a text on standard output; false, and said, where it cannot be. A reader that has left is no fault. */
+    boolean print(Written text) {
+        try {
+            text.writeTo(out);
+            out.flush();
+            return true;
+        } catch (IOException e) {
+            if (readerHasLeft(e)) {
+                return true;
+            }
+            complain("standard output", "cannot be written: " + e.getMessage());
+            return false;
+        }
+    }
+
+    /** Java has no type of its own for a broken pipe; these are the words of Linux and macOS, and of Windows. */
+    private static boolean readerHasLeft(IOException e) {
+        String message = e.getMessage();
+        return message != null && (message.contains("Broken pipe") || message.contains("pipe is being closed"));
+    }
+}

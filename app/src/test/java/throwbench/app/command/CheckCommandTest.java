@@ -1,0 +1,162 @@
+package throwbench.app.command;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import java.io.IOException;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.OptionalDouble;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import throwbench.solver.finding.Finding;
+import throwbench.solver.finding.Judgement;
+import throwbench.solver.machine.Machine;
+
+class CheckCommandTest {
+
+    /** Rod tension held to less than it is, so that the sample is not met at both of its duty points. */
+    private static final String GENEROUS = "\"rodTension\": \"120 kN\"";
+
+    private static final String TIGHT = "\"rodTension\": \"46 kN\"";
+
+    @TempDir
+    Path folder;
+
+    private static List<String> keys(JsonNode object) {
+        List<String> keys = new ArrayList<>();
+        object.fieldNames().forEachRemaining(keys::add);
+        return keys;
+    }
+
+    private static void assertNumber(OptionalDouble expected, JsonNode written) {
+        assertEquals(expected.isEmpty(), written.isNull());
+        if (expected.isPresent()) {
+            assertEquals(expected.getAsDouble(), written.doubleValue(), 0);
+        }
+    }
+
+    private static void assertText(String expected, JsonNode written) {
+        assertEquals(expected, written.textValue());
+    }
+
+    @Test
+    void jsonHasEveryFindingWithEveryKeyWorstFirst() throws IOException {
+        Path file = Run.machine(folder, GENEROUS, TIGHT);
+        Machine machine = SampleMachine.read(file);
+        List<Finding> expected = Judgement.of(machine, machine.dutyPoints()).findings();
+        Run run = Run.of("check", file.toString(), "--format", "json");
+        JsonNode root = new ObjectMapper().readTree(run.out());
+
+        assertEquals(ExitCode.NOT_MET, run.code());
+        assertEquals("", run.err());
+        assertEquals(List.of("machine", "findings"), keys(root));
+        assertText("Saltmarsh biogas booster", root.get("machine"));
+        assertEquals(expected.size(), root.get("findings").size());
+        for (int i = 0; i < expected.size(); i++) {
+            assertFinding(expected.get(i), root.get("findings").get(i));
+        }
+        assertText("not-met", root.get("findings").get(0).get("verdict"));
+    }
+
+    private static void assertFinding(Finding expected, JsonNode written) {
+        assertEquals(
+                List.of(
+                        "id",
+                        "duty",
+                        "stage",
+                        "throw",
+                        "chamber",
+                        "value",
+                        "unit",
+                        "limit",
+                        "margin",
+                        "angle_deg",
+                        "verdict",
+                        "source",
+                        "note"),
+                keys(written));
+        assertText(expected.criterion().id(), written.get("id"));
+        assertText(expected.where().duty(), written.get("duty"));
+        assertEquals(expected.where().stage().orElse(null), written.get("stage").textValue());
+        assertEquals(
+                expected.where().throwName().orElse(null), written.get("throw").textValue());
+        assertEquals(
+                expected.where().chamber().orElse(null), written.get("chamber").textValue());
+        assertNumber(expected.value(), written.get("value"));
+        assertText(expected.criterion().unit(), written.get("unit"));
+        assertNumber(expected.limit(), written.get("limit"));
+        assertNumber(expected.margin(), written.get("margin"));
+        assertEquals(expected.angle().isEmpty(), written.get("angle_deg").isNull());
+        if (expected.angle().isPresent()) {
+            double degrees = Math.toDegrees(expected.angle().getAsDouble());
+            assertEquals(degrees, written.get("angle_deg").doubleValue(), 0);
+        }
+        assertText(expected.verdict().text(), written.get("verdict"));
+        assertText(expected.criterion().source(), written.get("source"));
+        assertText(expected.note(), written.get("note"));
+    }
+
+    @Test
+    void oneDutyPointIsJudgedAloneAndItsVerdictIsTheExitCode() throws IOException {
+        String file = Run.machine(folder, GENEROUS, TIGHT).toString();
+        Run normal = Run.of("check", file, "--duty", "normal", "--format=json");
+        Run unloaded = Run.of("check", "--duty=crank end unloaded", "--format", "json", file);
+
+        assertEquals(ExitCode.NOT_MET, normal.code());
+        assertEquals(ExitCode.DONE, unloaded.code());
+        for (JsonNode finding : new ObjectMapper().readTree(unloaded.out()).get("findings")) {
+            assertText("crank end unloaded", finding.get("duty"));
+        }
+    }
+
+    @Test
+    void textGathersDutyPointsUnderTheirWorstAndEndsInAnAnswerAndTheCaution() throws IOException {
+        Run run = Run.of("check", Run.machine(folder, GENEROUS, TIGHT).toString());
+
+        // an own run guards the layout; the values are held against the solver's through the JSON
+        assertEquals("""
+                Saltmarsh biogas booster at 2 duty points
+
+                NOT MET     rod load, tension        throw A   46.25 kN  at most    46 kN    -0.5 %
+                            worst at "normal", crank angle 97.4 deg
+                            not met at 1 of 2 duty points: "normal"
+                met         rod load, compression    throw A   60.01 kN  at most   120 kN   +50.0 %
+                            worst at "normal", crank angle 286.7 deg
+                            met at all 2 duty points
+                met         reversal, span           throw A  38.02 deg  at least  15 deg  +153.5 %
+                            worst at "crank end unloaded", crank angle 62.5 deg; the span in tension governs
+                            met at all 2 duty points
+                met         reversal, share of peak  throw A      0.122  at least    0.03  +306.8 %
+                            worst at "crank end unloaded", crank angle 70.1 deg
+                            met at all 2 duty points
+                not judged  gas load, tension        throw A   60.91 kN
+                            greatest at "normal", crank angle 180.0 deg; no limit given
+                            least of 2 duty points: 1.099 kN at "crank end unloaded"
+                not judged  gas load, compression    throw A   66.04 kN
+                            greatest at "normal", crank angle 0.0 deg; no limit given
+                            the same at all 2 duty points
+
+                1 of 8 judged findings is not met; worst: rod load, tension of throw A at "normal", -0.5 %.
+                Results support, and do not replace, the manufacturer's limits, local codes and the judgement of a
+                licensed engineer.
+                """, run.out());
+        assertEquals("", run.err());
+        assertEquals(ExitCode.NOT_MET, run.code());
+    }
+
+    @Test
+    void textOfOneDutyPointNamesItOnce() throws IOException {
+        Run run = Run.of("check", Run.machine(folder).toString(), "--duty", "normal");
+        List<String> lines = run.out().lines().toList();
+
+        assertEquals(ExitCode.DONE, run.code());
+        assertEquals("Saltmarsh biogas booster at \"normal\"", lines.get(0));
+        assertEquals(1, lines.stream().filter(line -> line.contains("normal")).count());
+        assertTrue(run.out()
+                .contains("All 4 judged findings are met; closest: rod load, compression of throw A, +50.0 %."));
+    }
+}

@@ -1,0 +1,2 @@
+/** Throws and machines that the tests of several packages try: samples, and random ones. */
+package throwbench.solver.trial;
