@@ -62,6 +62,14 @@ class ArchitectureTest {
             .because("a description is complete without a solution or a verdict");
 
     @ArchTest
+    static final ArchRule DRIVE_KNOWS_A_TORQUE = uses("drive", "mechanism", "machine")
+            .because("the speed follows from a torque by the angle, wherever it comes from");
+
+    @ArchTest
+    static final ArchRule BALANCE_KNOWS_A_CURVE = uses("balance", "mechanism", "load", "machine")
+            .because("harmonics are those of any quantity over the turn");
+
+    @ArchTest
     static final ArchRule REVOLUTION_SOLVES = uses(
                     "revolution", "mechanism", "fluid", "chamber", "load", "machine", "balance", "drive")
             .because("results are the same whatever they are judged by");

@@ -29,9 +29,10 @@ enum Theme {
     }
 
     void apply(Scene scene) {
+        // the roles first: the sheets look them up
+        scene.getRoot().setStyle(PaletteStyle.of(palette));
         Application.setUserAgentStylesheet(userAgentStylesheet);
         scene.getStylesheets().setAll(sheet("controlsfx-bridge.css"), sheet("bench.css"));
-        scene.getRoot().setStyle(PaletteStyle.of(palette));
     }
 
     private static String sheet(String name) {

@@ -63,6 +63,7 @@ class SolveJsonTest {
                         "meanThrowTorque_N_m",
                         "meanShaftTorque_N_m",
                         "speedFluctuation",
+                        "harmonics",
                         "machine",
                         "notes"),
                 keys(summary));

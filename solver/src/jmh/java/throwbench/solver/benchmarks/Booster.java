@@ -51,10 +51,14 @@ final class Booster {
     }
 
     static Machine machine(String mechanism) {
+        return machine(mechanism, 0.4);
+    }
+
+    static Machine machine(String mechanism, double rodLength) {
         Throw t = new Throw(
                 "A",
                 new ShaftPlace(0, 0, 0),
-                new Linkage(0.075, 0.4, offset(mechanism)),
+                new Linkage(0.075, rodLength, offset(mechanism)),
                 new ReciprocatingMasses(38, 24, 42),
                 new ConnectingRod(55, OptionalDouble.of(0.13), OptionalDouble.of(1.35)),
                 new Crank(2.1, 0),

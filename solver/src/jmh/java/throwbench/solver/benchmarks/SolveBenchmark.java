@@ -29,7 +29,9 @@ public class SolveBenchmark {
     public String mechanism = "inline";
 
     private Machine machine;
+    private Machine[] lengthened = {};
     private Revolution earlier;
+    private Revolution spent;
     private PlainLoop plain;
     private int call;
 
@@ -37,6 +39,8 @@ public class SolveBenchmark {
     public void prepare() {
         machine = Booster.machine(mechanism);
         earlier = Revolution.solve(Booster.running(machine, Booster.SPEED, Booster.SUCTION), 0, STATIONS);
+        spent = Revolution.solve(Booster.running(machine, Booster.SPEED, Booster.SUCTION), 0, STATIONS);
+        lengthened = new Machine[] {Booster.machine(mechanism, 0.4), Booster.machine(mechanism, 0.4 + 1e-9)};
         plain = new PlainLoop(machine, STATIONS);
         plain.solve(Booster.SPEED, Booster.SUCTION, Booster.DISCHARGE);
         for (int i = 0; i < STATIONS; i++) {
@@ -53,15 +57,24 @@ public class SolveBenchmark {
         return Booster.SPEED * (1 + CHANGE * call);
     }
 
-    /** From the described machine, nothing kept. */
+    /** From the described machine, no geometry kept: the rod's length changes from call to call. */
     @Benchmark
     public Revolution allColumns() {
-        return Revolution.solve(Booster.running(machine, speed(), Booster.SUCTION), 0, STATIONS);
+        double speed = speed();
+        spent = Revolution.solveOver(Booster.running(lengthened[call & 1], speed, Booster.SUCTION), spent);
+        return spent;
     }
 
     /** As a dragged speed. */
     @Benchmark
     public Revolution allColumnsKeptGeometry() {
+        spent = Revolution.solveOver(Booster.running(machine, speed(), Booster.SUCTION), spent);
+        return spent;
+    }
+
+    /** The same as the window does it: a revolution of its own for each state. */
+    @Benchmark
+    public Revolution freshColumnsKeptGeometry() {
         return Revolution.solve(Booster.running(machine, speed(), Booster.SUCTION), 0, STATIONS, Optional.of(earlier));
     }
 

@@ -9,8 +9,8 @@ import throwbench.solver.mechanism.Sweep;
  */
 public final class ChamberSweep {
 
-    /** Below this relative change of volume a step, eight terms of the binomial series are exact to 1e-16. */
-    private static final double SMALL_STEP = 0.012;
+    /** Below this relative change of volume a step, the eleven terms of the binomial series are exact to 1e-17. */
+    private static final double SMALL_STEP = 0.04;
 
     private final Sweep sweep;
     private final ChamberVolume chamber;
@@ -18,6 +18,7 @@ public final class ChamberSweep {
     private final double[] power;
     private double compressionExponent;
     private double expansionExponent;
+    private final boolean smallSteps;
     private int volumeTurn;
     private int powerTurn;
 
@@ -26,6 +27,17 @@ public final class ChamberSweep {
         this.chamber = chamber;
         this.volume = new double[sweep.count()];
         this.power = new double[sweep.count()];
+        this.smallSteps = greatestStep() < SMALL_STEP;
+    }
+
+    /**
+     * A bound of |ΔV|/V from station to station. Where |d²s/dθ²| ≤ a and s ≥ 0, |ds/dθ| ≤ √(2 a s); with the clearance's
+     * length c the share √(2 a s)/(c + s) is greatest at s = c.
+     */
+    private double greatestStep() {
+        double clearanceLength = chamber.clearance() / chamber.area();
+        double bend = sweep.linkage().greatestBend();
+        return sweep.step() * Math.sqrt(bend / (2 * clearanceLength));
     }
 
     public Sweep sweep() {
@@ -72,13 +84,22 @@ public final class ChamberSweep {
     }
 
     private void leg(double[] v, int from, int to, double reference, double n) {
+        // the volume one station before, in place of the power: loops over one index alone become vector code
+        System.arraycopy(v, from, power, from + 1, to - from - 1);
+        if (smallSteps) {
+            stepFactors(v, from + 1, to, n);
+        } else {
+            for (int i = from + 1; i < to; i++) {
+                power[i] = Math.pow(power[i] / v[i], n);
+            }
+        }
         power[from] = Math.pow(reference / v[from], n);
-        stepFactors(v, from + 1, to, n);
         for (int i = from + 1; i < to; i++) {
             power[i] *= power[i - 1];
         }
     }
 
+    /** (1 + d)^n of the small change d from station to station, by Newton's series. */
     private void stepFactors(double[] v, int from, int to, double n) {
         double c2 = (n - 1) / 2;
         double c3 = (n - 2) / 3;
@@ -86,22 +107,21 @@ public final class ChamberSweep {
         double c5 = (n - 4) / 5;
         double c6 = (n - 5) / 6;
         double c7 = (n - 6) / 7;
-        double greatest = 0;
+        double c8 = (n - 7) / 8;
+        double c9 = (n - 8) / 9;
+        double c10 = (n - 9) / 10;
         for (int i = from; i < to; i++) {
-            double d = v[i - 1] / v[i] - 1;
-            double sum = 1 + c7 * d;
+            double d = power[i] / v[i] - 1;
+            double sum = 1 + c10 * d;
+            sum = Math.fma(c9 * d, sum, 1);
+            sum = Math.fma(c8 * d, sum, 1);
+            sum = Math.fma(c7 * d, sum, 1);
             sum = Math.fma(c6 * d, sum, 1);
             sum = Math.fma(c5 * d, sum, 1);
             sum = Math.fma(c4 * d, sum, 1);
             sum = Math.fma(c3 * d, sum, 1);
             sum = Math.fma(c2 * d, sum, 1);
             power[i] = Math.fma(n * d, sum, 1);
-            greatest = Math.max(greatest, Math.abs(d));
-        }
-        if (greatest > SMALL_STEP) {
-            for (int i = from; i < to; i++) {
-                power[i] = Math.pow(v[i - 1] / v[i], n);
-            }
         }
     }
 }

@@ -1,10 +1,10 @@
 package throwbench.solver.chamber;
 
-import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
+import throwbench.solver.chamber.ValveEvent.Valve;
 import throwbench.solver.fluid.Answer;
 import throwbench.solver.mechanism.Strokes;
 
@@ -29,7 +29,7 @@ final class IdealValveCycle implements PressureCurve {
     private final double high;
     private final double compressionExponent;
     private final double expansionExponent;
-    private final List<ValveEvent> events;
+    private final Optional<Openings> openings;
     private final Passed passed;
     private final List<String> notes;
 
@@ -38,13 +38,28 @@ final class IdealValveCycle implements PressureCurve {
         static final Passed NOTHING = new Passed(0, OptionalDouble.of(0), OptionalDouble.empty());
     }
 
+    /** The volumes (m³) at which the valves open; their angles are made when asked for, which a map point does not. */
+    private record Openings(ChamberDuty duty, double suction, double discharge) {
+
+        List<ValveEvent> events() {
+            ValveEvent suctionOpens = new ValveEvent(Valve.SUCTION, true, duty.crankAngleAt(suction, true));
+            ValveEvent suctionShuts = new ValveEvent(Valve.SUCTION, false, duty.greatestVolumeAngle());
+            ValveEvent dischargeOpens = new ValveEvent(Valve.DISCHARGE, true, duty.crankAngleAt(discharge, false));
+            ValveEvent dischargeShuts = new ValveEvent(Valve.DISCHARGE, false, duty.leastVolumeAngle());
+            // in the order of the crank angle: each side's volume is least at its own dead centre
+            return duty.volume().side() == Side.HEAD
+                    ? List.of(dischargeShuts, suctionOpens, suctionShuts, dischargeOpens)
+                    : List.of(suctionShuts, dischargeOpens, dischargeShuts, suctionOpens);
+        }
+    }
+
     private IdealValveCycle(
             Way way,
             double low,
             double high,
             double compressionExponent,
             double expansionExponent,
-            List<ValveEvent> events,
+            Optional<Openings> openings,
             Passed passed,
             String note) {
         this.way = way;
@@ -52,7 +67,7 @@ final class IdealValveCycle implements PressureCurve {
         this.high = high;
         this.compressionExponent = compressionExponent;
         this.expansionExponent = expansionExponent;
-        this.events = events;
+        this.openings = openings;
         this.passed = passed;
         this.notes = note.isEmpty() ? List.of() : List.of(note);
     }
@@ -93,7 +108,7 @@ final class IdealValveCycle implements PressureCurve {
     private static IdealValveCycle heldOpen(IdealValves valves, LineConditions lines) {
         double falling = lines.suctionPressure() * (1 - valves.suctionLoss());
         double rising = lines.suctionPressure() * (1 + valves.suctionLoss());
-        return new IdealValveCycle(Way.HELD_OPEN, falling, rising, 1, 1, List.of(), Passed.NOTHING, "");
+        return new IdealValveCycle(Way.HELD_OPEN, falling, rising, 1, 1, Optional.empty(), Passed.NOTHING, "");
     }
 
     private static IdealValveCycle breathing(double low, double reached, double n) {
@@ -103,7 +118,7 @@ final class IdealValveCycle implements PressureCurve {
                 reached,
                 n,
                 n,
-                List.of(),
+                Optional.empty(),
                 Passed.NOTHING,
                 "no valve opens: the gas trapped in the clearance is compressed and expands again, nothing is delivered");
     }
@@ -113,13 +128,6 @@ final class IdealValveCycle implements PressureCurve {
         ChamberVolume volume = duty.volume();
         double suctionOpens = volume.least() * Math.pow(high / low, 1 / ne);
         double dischargeOpens = volume.greatest() * Math.pow(low / high, 1 / nc);
-        List<ValveEvent> events = new ArrayList<>();
-        events.add(event(ValveEvent.Valve.SUCTION, true, duty.crankAngleAt(suctionOpens, true)));
-        events.add(event(ValveEvent.Valve.SUCTION, false, duty.greatestVolumeAngle()));
-        events.add(event(ValveEvent.Valve.DISCHARGE, true, duty.crankAngleAt(dischargeOpens, false)));
-        events.add(event(ValveEvent.Valve.DISCHARGE, false, duty.leastVolumeAngle()));
-        events.sort(Comparator.comparingDouble(ValveEvent::crankAngle));
-
         double drawn = Math.max(0, volume.greatest() - suctionOpens) * (1 - duty.flowAllowance());
         // low pressure and line temperature: what the chamber holds when the suction valve shuts
         double inletVolume = drawn * low / duty.lines().suctionPressure();
@@ -137,13 +145,9 @@ final class IdealValveCycle implements PressureCurve {
                 high,
                 nc,
                 ne,
-                List.copyOf(events),
+                Optional.of(new Openings(duty, suctionOpens, dischargeOpens)),
                 new Passed(inletVolume, mass, discharged),
                 temperature.isPresent() ? "" : NO_TEMPERATURE);
-    }
-
-    private static ValveEvent event(ValveEvent.Valve valve, boolean opens, double crankAngle) {
-        return new ValveEvent(valve, opens, crankAngle);
     }
 
     @Override
@@ -176,7 +180,7 @@ final class IdealValveCycle implements PressureCurve {
 
     @Override
     public List<ValveEvent> events() {
-        return events;
+        return openings.map(Openings::events).orElse(List.of());
     }
 
     @Override

@@ -94,6 +94,15 @@ final class SpeedPiece {
         return energy(NODES) - next.energy(0);
     }
 
+    /** What a constant torque (N·m) and the load do on the shaft from the start to a node, J. */
+    double work(int node, double torque) {
+        double work = 0;
+        for (int j = 0; j < NODES; j++) {
+            work += length * SCHEME.integral(node, j) * (torque - load[j + 1]);
+        }
+        return work;
+    }
+
     /** Weight of a node in an integral over the piece, rad. */
     double weight(int node) {
         return length * SCHEME.weight(node);

@@ -1,7 +1,5 @@
 package throwbench.solver.drive;
 
-import java.math.BigDecimal;
-import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import throwbench.solver.machine.Driver;
@@ -108,10 +106,12 @@ public final class SpeedSolver {
             if (step(closing())) {
                 SpeedCurve curve = curve();
                 // between the nodes of a shaft that all but stops the polynomial falls below 0
-                return curve.least() > 0 ? SpeedOutcome.solved(curve) : SpeedOutcome.refused(refusal());
+                return curve.least() > 0
+                        ? SpeedOutcome.solved(curve)
+                        : SpeedOutcome.refused(EnergyShortage.sentence(pieces, rotatingInertia, meanSpeed));
             }
         }
-        return SpeedOutcome.refused(refusal());
+        return SpeedOutcome.refused(EnergyShortage.sentence(pieces, rotatingInertia, meanSpeed));
     }
 
     /** The changes of the energy at angle 0 and of T_0 with which the turn repeats and takes its time. */
@@ -238,42 +238,5 @@ public final class SpeedSolver {
             worst = Math.max(worst, Math.abs(driving.at(speed) - taken));
         }
         return worst;
-    }
-
-    /** The greatest energy less the least of a turn at constant torque, J, with the load last read. */
-    double energyFluctuation() {
-        double mean = 0;
-        for (SpeedPiece piece : pieces) {
-            for (int i = 0; i < Collocation.NODES; i++) {
-                mean += piece.weight(i) * piece.load[i + 1] / Angles.TURN;
-            }
-        }
-        double start = 0;
-        double least = 0;
-        double greatest = 0;
-        for (SpeedPiece piece : pieces) {
-            double energy = start;
-            for (int i = 0; i < Collocation.NODES; i++) {
-                energy = start;
-                for (int j = 0; j < Collocation.NODES; j++) {
-                    energy += piece.length * Collocation.radau().integral(i, j) * (mean - piece.load[j + 1]);
-                }
-                least = Math.min(least, energy);
-                greatest = Math.max(greatest, energy);
-            }
-            start = energy;
-        }
-        return greatest - least;
-    }
-
-    private String refusal() {
-        return "no speed is found that repeats: the load takes up to " + rounded(energyFluctuation())
-                + " J from the shaft within a turn, and " + rounded(rotatingInertia) + " kg m2 hold "
-                + rounded(rotatingInertia * meanSpeed * meanSpeed / 2)
-                + " J at the mean speed; wanted more rotatingInertia";
-    }
-
-    private static String rounded(double value) {
-        return new BigDecimal(value).round(new MathContext(4)).toPlainString();
     }
 }

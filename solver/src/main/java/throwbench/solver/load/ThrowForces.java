@@ -29,25 +29,37 @@ public final class ThrowForces {
     private final double[] axial;
     private final double[] rodShare;
 
+    private final double[][] block;
+
     public ThrowForces(ThrowBody body, int count) {
+        this(body, new double[17][count]);
+    }
+
+    private ThrowForces(ThrowBody body, double[][] block) {
         this.body = body;
-        inertiaLoad = new double[count];
-        rodLoad = new double[count];
-        pistonRodLoad = new double[count];
-        guideForce = new double[count];
-        crossheadPinX = new double[count];
-        crossheadPinY = new double[count];
-        crankPinX = new double[count];
-        crankPinY = new double[count];
-        mainBearingX = new double[count];
-        mainBearingY = new double[count];
-        torque = new double[count];
-        rodCentreX = new double[count];
-        rodCentreY = new double[count];
-        frameX = new double[count];
-        frameY = new double[count];
-        axial = new double[count];
-        rodShare = new double[count];
+        this.block = block;
+        inertiaLoad = block[0];
+        rodLoad = block[1];
+        pistonRodLoad = block[2];
+        guideForce = block[3];
+        crossheadPinX = block[4];
+        crossheadPinY = block[5];
+        crankPinX = block[6];
+        crankPinY = block[7];
+        mainBearingX = block[8];
+        mainBearingY = block[9];
+        torque = block[10];
+        rodCentreX = block[11];
+        rodCentreY = block[12];
+        frameX = block[13];
+        frameY = block[14];
+        axial = block[15];
+        rodShare = block[16];
+    }
+
+    /** Forces of another throw in these arrays: what stands in them is given up. */
+    public ThrowForces over(ThrowBody next) {
+        return new ThrowForces(next, block);
     }
 
     /**
@@ -130,10 +142,11 @@ public final class ThrowForces {
         double gy = body.gravityY();
         double[] sin = sweep.sinRod();
         double[] cos = sweep.cosRod();
+        double[] sec = sweep.secRod();
         double[] b2 = motion.rodAcceleration;
         for (int i = 0; i < rodShare.length; i++) {
             double turning = Math.fma(rodCentreX[i] - gx, sin[i], (rodCentreY[i] - gy) * cos[i]);
-            rodShare[i] = perLength * Math.fma(inertia, b2[i], -moment * turning) / cos[i];
+            rodShare[i] = perLength * Math.fma(inertia, b2[i], -moment * turning) * sec[i];
         }
     }
 
@@ -141,24 +154,24 @@ public final class ThrowForces {
     private void guide(Sweep sweep) {
         double weight = body.masses().total() * body.gravityY();
         double[] sin = sweep.sinRod();
-        double[] cos = sweep.cosRod();
+        double[] sec = sweep.secRod();
         for (int i = 0; i < guideForce.length; i++) {
-            guideForce[i] = -Math.fma(axial[i], sin[i] / cos[i], rodShare[i] + weight);
+            guideForce[i] = -Math.fma(axial[i], sin[i] * sec[i], rodShare[i] + weight);
         }
         double mu = body.friction().guideCoefficient();
         if (mu != 0) {
             Strokes strokes = sweep.strokes();
             for (int k = 0; k < strokes.count(); k++) {
-                guideFriction(sin, cos, strokes.from(k), strokes.to(k), strokes.inward(k) ? -mu : mu);
+                guideFriction(sin, sec, strokes.from(k), strokes.to(k), strokes.inward(k) ? -mu : mu);
             }
         }
     }
 
     /** @param mu μ with the sign of dx/dt */
-    private void guideFriction(double[] sin, double[] cos, int from, int to, double mu) {
+    private void guideFriction(double[] sin, double[] sec, int from, int to, double mu) {
         for (int i = from; i < to; i++) {
             double free = guideForce[i];
-            guideForce[i] = free / (1 - Math.signum(free) * mu * sin[i] / cos[i]);
+            guideForce[i] = free / (1 - Math.signum(free) * mu * sin[i] * sec[i]);
             axial[i] -= mu * Math.abs(guideForce[i]);
         }
     }
@@ -166,12 +179,12 @@ public final class ThrowForces {
     /** R on the crosshead: R_x = −P − F_gd, R_y = share − R_x tan β. */
     private void crossheadPin(Sweep sweep) {
         double[] sin = sweep.sinRod();
-        double[] cos = sweep.cosRod();
+        double[] sec = sweep.secRod();
         for (int i = 0; i < crossheadPinX.length; i++) {
             crossheadPinX[i] = -axial[i];
         }
         for (int i = 0; i < crossheadPinY.length; i++) {
-            crossheadPinY[i] = Math.fma(axial[i], sin[i] / cos[i], rodShare[i]);
+            crossheadPinY[i] = Math.fma(axial[i], sin[i] * sec[i], rodShare[i]);
         }
     }
 

@@ -73,6 +73,15 @@ public record Linkage(double crankRadius, double rodLength, double guideOffset) 
         return (crankRadius + Math.abs(guideOffset)) / rodLength;
     }
 
+    /** A bound of |x″|, m: no second derivative of the reach by the pin's angle is larger. */
+    public double greatestBend() {
+        double sin = greatestSinRodAngle();
+        double cos = Math.sqrt((1 - sin) * (1 + sin));
+        double ratio = crankRadius / rodLength;
+        // |β′| ≤ ratio/cos and |β″| ≤ (sin β′² + ratio)/cos in x″ = −r cos θ − l (cos β β′² + sin β β″)
+        return crankRadius + rodLength * (ratio * ratio / (cos * cos * cos) + sin * ratio / cos);
+    }
+
     /** x of the crosshead pin at a pin angle θ (rad), m. */
     public double reach(double pinAngle) {
         double sinBeta = sinRodAngle(pinAngle);

@@ -19,6 +19,7 @@ public final class Sweep {
     private final double[] cosPin;
     private final double[] sinRod;
     private final double[] cosRod;
+    private final double[] secRod;
     private final double[] rodAngle;
     private final double[] reach1;
     private final double[] reach2;
@@ -27,6 +28,7 @@ public final class Sweep {
     private final double[] travel;
     private final Strokes strokes = new Strokes();
     private int turns;
+    private int rodAngleTurn;
 
     private Sweep(Linkage linkage, Rotation rotation, int count) {
         this.linkage = linkage;
@@ -38,6 +40,7 @@ public final class Sweep {
         cosPin = new double[count];
         sinRod = new double[count];
         cosRod = new double[count];
+        secRod = new double[count];
         rodAngle = new double[count];
         reach1 = new double[count];
         reach2 = new double[count];
@@ -55,6 +58,7 @@ public final class Sweep {
     public static Sweep wholeTurn(Linkage linkage, Rotation rotation, double start, int count) {
         Sweep sweep = new Sweep(linkage, rotation, count);
         sweep.fill(start, StationCircle.of(count), Approach.JUST_AFTER);
+        sweep.rodAngle(); // complete before other threads see it
         return sweep;
     }
 
@@ -113,12 +117,14 @@ public final class Sweep {
             cosRod[i] = Math.sqrt((1 - s) * (1 + s));
         }
         for (int i = 0; i < count; i++) {
-            rodAngle1[i] = ratio * cosPin[i] / cosRod[i];
+            secRod[i] = 1 / cosRod[i];
         }
         for (int i = 0; i < count; i++) {
-            rodAngle2[i] = Math.fma(sinRod[i], rodAngle1[i] * rodAngle1[i], -ratio * sinPin[i]) / cosRod[i];
+            rodAngle1[i] = ratio * cosPin[i] * secRod[i];
         }
-        ArcSine.fill(sinRod, rodAngle, linkage.greatestSinRodAngle());
+        for (int i = 0; i < count; i++) {
+            rodAngle2[i] = Math.fma(sinRod[i], rodAngle1[i] * rodAngle1[i], -ratio * sinPin[i]) * secRod[i];
+        }
     }
 
     private void reaches() {
@@ -149,6 +155,11 @@ public final class Sweep {
     /** Number of stations. */
     public int count() {
         return count;
+    }
+
+    /** Crank angle from station to station, rad; a whole turn for a single angle. */
+    public double step() {
+        return Angles.TURN / count;
     }
 
     /** Grows each time a single angle is turned: what was kept for another place is stale. */
@@ -186,8 +197,17 @@ public final class Sweep {
         return cosRod;
     }
 
-    /** β, rad. */
+    /** 1/cos β. */
+    public double[] secRod() {
+        return secRod;
+    }
+
+    /** β, rad: made when first asked for, since no force needs it. */
     public double[] rodAngle() {
+        if (rodAngleTurn != turns) {
+            ArcSine.fill(sinRod, rodAngle, linkage.greatestSinRodAngle());
+            rodAngleTurn = turns;
+        }
         return rodAngle;
     }
 

@@ -1,5 +1,6 @@
 package throwbench.solver.revolution;
 
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.stream.DoubleStream;
@@ -42,15 +43,29 @@ public final class BreakAngles {
         return sorted(all);
     }
 
-    /** Dead centres and valve events. */
+    /** Those of the rod load, which holds no friction. */
+    static double[] ofRodLoad(RunningMachine running, int throwIndex) {
+        return running.speedCurve().constant() ? steps(running, throwIndex) : ofMachine(running, throwIndex);
+    }
+
+    /** Dead centres and valve events; in plain loops, since every point of a map asks for them. */
     private static double[] steps(RunningMachine running, int throwIndex) {
         RunningThrow t = running.throwsInOrder().get(throwIndex);
-        DoubleStream deadCentres = DoubleStream.of(0, t.body().linkage().crankEndDeadCentre(running.rotation()));
-        DoubleStream events = t.curves().stream()
-                .map(PressureCurve::events)
-                .flatMap(List::stream)
-                .mapToDouble(ValveEvent::crankAngle);
-        return sorted(DoubleStream.concat(deadCentres, events));
+        List<PressureCurve> curves = t.curves();
+        int count = 2;
+        List<List<ValveEvent>> events = new ArrayList<>(curves.size());
+        for (PressureCurve curve : curves) {
+            events.add(curve.events());
+            count += events.get(events.size() - 1).size();
+        }
+        double[] angles = new double[count];
+        angles[--count] = t.body().linkage().crankEndDeadCentre(running.rotation());
+        for (List<ValveEvent> ofChamber : events) {
+            for (ValveEvent event : ofChamber) {
+                angles[--count] = event.crankAngle();
+            }
+        }
+        return sorted(angles); // the angle left at 0 is head-end dead centre
     }
 
     /** Those of a throw and the joints of its pressure curves: what an integral over the revolution is split at. */
@@ -100,7 +115,11 @@ public final class BreakAngles {
     }
 
     private static double[] sorted(DoubleStream unsorted) {
-        double[] angles = unsorted.sorted().toArray();
+        return sorted(unsorted.toArray());
+    }
+
+    private static double[] sorted(double[] angles) {
+        Arrays.sort(angles);
         int kept = 0;
         for (double angle : angles) {
             // angles of two throws that mean the same instant differ by rounding; just below a turn is angle 0

@@ -14,6 +14,7 @@ final class MachineStations {
 
     private final RunningMachine running;
     private final ThrowStations[] throwStations;
+    private final double[][] block;
     private final double[] speed;
     private final double[] alpha;
     private final double[] shaftTorque;
@@ -23,17 +24,26 @@ final class MachineStations {
     private final double[] shakingCoupleY;
 
     MachineStations(RunningMachine running, List<ThrowStations> throwStations) {
+        this(running, throwStations, new double[7][throwStations.get(0).sweep().count()]);
+    }
+
+    private MachineStations(RunningMachine running, List<ThrowStations> throwStations, double[][] block) {
         this.running = running;
         this.throwStations = throwStations.toArray(new ThrowStations[0]);
-        int count = this.throwStations[0].sweep().count();
-        speed = new double[count];
-        alpha = new double[count];
-        shaftTorque = new double[count];
-        shakingForceX = new double[count];
-        shakingForceY = new double[count];
-        shakingCoupleX = new double[count];
-        shakingCoupleY = new double[count];
-        Arrays.fill(speed, running.meanSpeed());
+        this.block = block;
+        speed = block[0];
+        alpha = block[1];
+        shaftTorque = block[2];
+        shakingForceX = block[3];
+        shakingForceY = block[4];
+        shakingCoupleX = block[5];
+        shakingCoupleY = block[6];
+    }
+
+    /** Another solution in these arrays, whose values are given up. */
+    MachineStations over(RunningMachine next, List<ThrowStations> nextStations) {
+        boolean fits = nextStations.get(0).sweep().count() == count();
+        return fits ? new MachineStations(next, nextStations, block) : new MachineStations(next, nextStations);
     }
 
     /**
@@ -42,7 +52,10 @@ final class MachineStations {
      * @param approach the side that the sweeps were turned to
      */
     void solve(Approach approach) {
-        if (!running.speedCurve().constant()) {
+        if (running.speedCurve().constant()) {
+            Arrays.fill(speed, running.meanSpeed());
+            Arrays.fill(alpha, 0);
+        } else {
             running.fillSpeed(0, throwStations[0].sweep().crankAngle(), approach, speed, alpha);
         }
         for (ThrowStations t : throwStations) {

@@ -1,12 +1,18 @@
 package throwbench.solver.revolution;
 
+import java.math.BigDecimal;
+import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import throwbench.solver.load.ConnectingRod;
 import throwbench.solver.machine.Chamber;
+import throwbench.solver.machine.DutyPoint;
+import throwbench.solver.machine.StageConditions;
 
 /** What a user must be told of a solution: assumptions made for missing values, chambers that deliver nothing. */
 final class Notes {
+
+    private static final MathContext SIX_DIGITS = new MathContext(6);
 
     private Notes() {}
 
@@ -27,6 +33,21 @@ final class Notes {
                 notes.add(chamber.name() + ": " + note);
             }
         }
+        running.machine().dutyPoints().stream()
+                .filter(written -> written.name().equals(running.dutyPoint().name()))
+                .findFirst()
+                .ifPresent(written -> addBalanced(written, running.dutyPoint(), notes));
         return List.copyOf(notes);
+    }
+
+    private static void addBalanced(DutyPoint written, DutyPoint settled, List<String> notes) {
+        settled.stages().forEach((stage, lines) -> {
+            StageConditions asked = written.stages().get(stage);
+            if (asked != null && asked.suctionPressure().isEmpty()) {
+                lines.suctionPressure()
+                        .ifPresent(pressure -> notes.add("stage " + stage + ": the balanced suction pressure is "
+                                + new BigDecimal(pressure).round(SIX_DIGITS).toPlainString() + " Pa absolute"));
+            }
+        });
     }
 }

@@ -84,7 +84,27 @@ public record Reversal(
 
     /** Reversal duration, rad: the shorter of the two longest unbroken spans; 0 without a sign change. */
     public double duration() {
-        return governing().map(Span::length).orElse(0.0);
+        return duration(signChanges);
+    }
+
+    /** The same from sign changes alone, which rise by angle. */
+    static double duration(List<SignChange> changes) {
+        double tension = 0;
+        double compression = 0;
+        for (int i = 0; i < changes.size(); i++) {
+            SignChange from = changes.get(i);
+            boolean last = i + 1 == changes.size();
+            double to = last
+                    ? changes.get(0).crankAngle() + Angles.TURN
+                    : changes.get(i + 1).crankAngle();
+            double length = to - from.crankAngle();
+            if (from.toTension()) {
+                tension = Math.max(tension, length);
+            } else {
+                compression = Math.max(compression, length);
+            }
+        }
+        return Math.min(tension, compression);
     }
 
     /** Reversal ratio: the smaller peak over the larger one; 0 without a sign change. */

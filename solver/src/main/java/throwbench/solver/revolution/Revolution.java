@@ -6,11 +6,13 @@ import java.util.Optional;
 import throwbench.solver.chamber.ChamberSweep;
 import throwbench.solver.mechanism.Angles;
 import throwbench.solver.mechanism.Approach;
+import throwbench.solver.mechanism.Linkage;
 import throwbench.solver.mechanism.Sweep;
 
 /**
  * A solved revolution: every quantity of every throw at equally spaced stations. Station i stands at the crank angle
- * 2π i/N of the shown throw; 2π is not repeated. Immutable once solved, and may be read by any thread.
+ * 2π i/N of the shown throw; 2π is not repeated. Immutable once solved, and may be read by any thread, until its owner
+ * gives it up to {@link #solveOver}.
  */
 public final class Revolution {
 
@@ -40,19 +42,49 @@ public final class Revolution {
         List<ThrowStations> throwStations = new ArrayList<>();
         for (int i = 0; i < running.throwsInOrder().size(); i++) {
             RunningThrow t = running.throwsInOrder().get(i);
-            double start = Angles.wrap(running.angleBetween(shown, i));
-            int index = i;
-            Optional<ThrowStations> kept =
-                    earlier.filter(e -> e.keeps(running, index, start, count)).map(e -> e.stations.of(index));
-            Sweep sweep = kept.map(ThrowStations::sweep)
-                    .orElseGet(() -> Sweep.wholeTurn(t.body().linkage(), running.rotation(), start, count));
-            List<ChamberSweep> chambers = kept.map(ThrowStations::chambers).orElse(List.of());
+            Sweep sweep = sweep(running, shown, i, count, earlier);
+            List<ChamberSweep> chambers =
+                    i < throwCount(earlier) ? earlier.get().stations.of(i).chambers() : List.of();
             throwStations.add(
                     new ThrowStations(t, sweep, running.machine().site().framePressure(), chambers));
         }
-        MachineStations all = new MachineStations(running, throwStations);
-        all.solve(Approach.JUST_AFTER);
-        return new Revolution(all, shown);
+        return new Revolution(new MachineStations(running, throwStations), shown).solved();
+    }
+
+    /**
+     * Solves into the arrays of a revolution that nobody reads any more, keeping its geometry where it still holds: for one
+     * thread that reads many machines one after another, as a study does. The spent revolution's values are given up.
+     */
+    public static Revolution solveOver(RunningMachine running, Revolution spent) {
+        List<ThrowStations> throwStations = new ArrayList<>();
+        double framePressure = running.machine().site().framePressure();
+        for (int i = 0; i < running.throwsInOrder().size(); i++) {
+            RunningThrow t = running.throwsInOrder().get(i);
+            Sweep sweep = sweep(running, spent.shown, i, spent.count(), Optional.of(spent));
+            throwStations.add(
+                    i < throwCount(Optional.of(spent))
+                            ? spent.stations.of(i).over(t, sweep, framePressure)
+                            : new ThrowStations(t, sweep, framePressure, List.of()));
+        }
+        return new Revolution(spent.stations.over(running, throwStations), spent.shown).solved();
+    }
+
+    private Revolution solved() {
+        stations.solve(Approach.JUST_AFTER);
+        return this;
+    }
+
+    private static int throwCount(Optional<Revolution> earlier) {
+        return earlier.map(e -> e.running().throwsInOrder().size()).orElse(0);
+    }
+
+    private static Sweep sweep(RunningMachine running, int shown, int index, int count, Optional<Revolution> earlier) {
+        double start = Angles.wrap(running.angleBetween(shown, index));
+        if (earlier.isPresent() && earlier.get().keeps(running, index, start, count)) {
+            return earlier.get().stations.of(index).sweep();
+        }
+        Linkage linkage = running.throwsInOrder().get(index).body().linkage();
+        return Sweep.wholeTurn(linkage, running.rotation(), start, count);
     }
 
     private boolean keeps(RunningMachine next, int index, double start, int count) {

@@ -14,12 +14,25 @@ public final class RodLoadCurve implements Curve {
     private final double[] alpha = new double[1];
 
     public RodLoadCurve(RunningMachine running, int throwIndex) {
+        this(running, throwIndex, single(running, throwIndex));
+    }
+
+    private RodLoadCurve(RunningMachine running, int throwIndex, ThrowStations stations) {
         this.running = running;
         this.throwIndex = throwIndex;
+        this.stations = stations;
+        speed = new double[] {running.meanSpeed()};
+    }
+
+    private static ThrowStations single(RunningMachine running, int throwIndex) {
         RunningThrow t = running.throwsInOrder().get(throwIndex);
         Sweep sweep = Sweep.single(t.body().linkage(), running.rotation());
-        stations = new ThrowStations(t, sweep, running.machine().site().framePressure(), List.of());
-        speed = new double[] {running.meanSpeed()};
+        return new ThrowStations(t, sweep, running.machine().site().framePressure(), List.of());
+    }
+
+    /** The rod load of the same throw of another machine, in this curve's arrays: this one is given up. */
+    RodLoadCurve over(RunningMachine next) {
+        return new RodLoadCurve(next, throwIndex, stations.over(next, throwIndex));
     }
 
     @Override

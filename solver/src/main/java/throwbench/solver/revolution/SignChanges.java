@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
-import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import throwbench.solver.mechanism.Angles;
 import throwbench.solver.mechanism.Approach;
 
@@ -13,11 +12,6 @@ import throwbench.solver.mechanism.Approach;
  * angle; a touch without a change of sign does not count.
  */
 final class SignChanges {
-
-    /** Crank angle to which a change is found, rad: well below what any drawing or criterion tells apart. */
-    private static final double ANGLE_ACCURACY = 1e-13;
-
-    private static final int MOST_EVALUATIONS = 200;
 
     /** Share of the peak that is rounding: a touch of zero must not become a pair of changes by it. */
     private static final double ROUNDING = 1e-12;
@@ -59,14 +53,32 @@ final class SignChanges {
         lastAngle = trace.angle(first);
         lastValue = trace.value(first);
         for (int i = first; i < trace.count(); i++) {
-            Optional<Extreme> dip = dip(i);
-            double angle = trace.angle(i);
-            dip.filter(d -> d.crankAngle() < angle).ifPresent(d -> meet(d.crankAngle(), d.value()));
-            meet(angle, trace.value(i));
-            dip.filter(d -> d.crankAngle() > angle).ifPresent(d -> meet(d.crankAngle(), d.value()));
+            if (clear(i)) {
+                meet(trace.angle(i), trace.value(i));
+            } else {
+                meetWithDip(i);
+            }
         }
         // zeros before the first sample that has a sign: from the end of the turn on to that sample
         meet(trace.angle(first) + Angles.TURN, trace.value(first));
+    }
+
+    /** Whether a sample between smooth neighbours is farther from zero than the curve could dip beside it. */
+    private boolean clear(int i) {
+        if (i == 0 || i + 1 == trace.count() || !trace.smooth(i - 1, i + 1)) {
+            return false;
+        }
+        double value = trace.value(i);
+        return Math.abs(value) > Math.abs(value - trace.value(i - 1)) + Math.abs(value - trace.value(i + 1));
+    }
+
+    /** A dip lies before its sample or behind it. */
+    private void meetWithDip(int i) {
+        Optional<Extreme> dip = dip(i);
+        double angle = trace.angle(i);
+        dip.filter(d -> d.crankAngle() < angle).ifPresent(d -> meet(d.crankAngle(), d.value()));
+        meet(angle, trace.value(i));
+        dip.filter(d -> d.crankAngle() > angle).ifPresent(d -> meet(d.crankAngle(), d.value()));
     }
 
     private boolean isZero(double value) {
@@ -92,19 +104,7 @@ final class SignChanges {
     }
 
     private double root(double from, double fromValue, double to, double toValue) {
-        if (to - from < ANGLE_ACCURACY) {
-            return to;
-        }
-        double atFrom = trace.curve().at(from, Approach.JUST_AFTER);
-        double atTo = trace.curve().at(to, Approach.JUST_BEFORE);
-        // the bracket may end on a step whose other side was sampled
-        if (atFrom * fromValue <= 0) {
-            return from;
-        }
-        if (atTo * toValue <= 0) {
-            return to;
-        }
-        return new BrentSolver(1e-15, ANGLE_ACCURACY, 0)
-                .solve(MOST_EVALUATIONS, x -> trace.curve().at(x, Turning.side(from, x, to)), from, to);
+        // a step: both values stand at one angle
+        return to - from < Approach.TOLERANCE ? to : Illinois.root(trace.curve(), from, fromValue, to, toValue);
     }
 }

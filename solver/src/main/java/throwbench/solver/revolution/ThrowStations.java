@@ -8,6 +8,7 @@ import throwbench.solver.chamber.ChamberVolume;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.load.ThrowForces;
 import throwbench.solver.load.ThrowMotion;
+import throwbench.solver.mechanism.Linkage;
 import throwbench.solver.mechanism.Sweep;
 
 /** One throw at the stations of its sweep: pressures, motion and forces, filled by the same loops for one station or many. */
@@ -24,10 +25,67 @@ final class ThrowStations {
 
     /** @param kept a chamber sweep of an earlier solution is used again where sweep and volume are the same */
     ThrowStations(RunningThrow running, Sweep sweep, double framePressure, List<ChamberSweep> kept) {
+        this(
+                running,
+                sweep,
+                framePressure,
+                chambers(running, sweep, kept),
+                new double[running.volumes().size()][sweep.count()],
+                new double[sweep.count()],
+                new ThrowMotion(sweep.count()),
+                new ThrowForces(running.body(), sweep.count()));
+    }
+
+    private ThrowStations(
+            RunningThrow running,
+            Sweep sweep,
+            double framePressure,
+            List<ChamberSweep> chambers,
+            double[][] pressures,
+            double[] gasLoad,
+            ThrowMotion motion,
+            ThrowForces forces) {
         this.running = running;
         this.sweep = sweep;
         this.framePressure = framePressure;
-        this.chambers = new ArrayList<>();
+        this.chambers = chambers;
+        this.pressures = pressures;
+        this.gasLoad = gasLoad;
+        this.motion = motion;
+        this.forces = forces;
+    }
+
+    /** Another solution in these arrays, whose values are given up; kept geometry as above. */
+    ThrowStations over(RunningThrow next, Sweep nextSweep, double nextFramePressure) {
+        boolean fits = nextSweep.count() == sweep.count() && next.volumes().size() == pressures.length;
+        return fits
+                ? new ThrowStations(
+                        next,
+                        nextSweep,
+                        nextFramePressure,
+                        chambers(next, nextSweep, chambers),
+                        pressures,
+                        gasLoad,
+                        motion,
+                        forces.over(next.body()))
+                : new ThrowStations(next, nextSweep, nextFramePressure, chambers);
+    }
+
+    /** The same with the sweep kept where the geometry still holds; stations count from head-end dead centre. */
+    ThrowStations over(RunningMachine next, int throwIndex) {
+        RunningThrow t = next.throwsInOrder().get(throwIndex);
+        Linkage linkage = t.body().linkage();
+        Sweep nextSweep = sweep;
+        if (!sweep.linkage().equals(linkage) || sweep.rotation() != next.rotation()) {
+            nextSweep = sweep.count() == 1
+                    ? Sweep.single(linkage, next.rotation())
+                    : Sweep.wholeTurn(linkage, next.rotation(), 0, sweep.count());
+        }
+        return over(t, nextSweep, next.machine().site().framePressure());
+    }
+
+    private static List<ChamberSweep> chambers(RunningThrow running, Sweep sweep, List<ChamberSweep> kept) {
+        List<ChamberSweep> chambers = new ArrayList<>();
         for (int i = 0; i < running.volumes().size(); i++) {
             ChamberVolume volume = running.volumes().get(i);
             boolean same = i < kept.size()
@@ -35,10 +93,7 @@ final class ThrowStations {
                     && kept.get(i).chamber().equals(volume);
             chambers.add(same ? kept.get(i) : new ChamberSweep(sweep, volume));
         }
-        pressures = new double[chambers.size()][sweep.count()];
-        gasLoad = new double[sweep.count()];
-        motion = new ThrowMotion(sweep.count());
-        forces = new ThrowForces(running.body(), sweep.count());
+        return chambers;
     }
 
     /** Pressures, gas load, acceleration, inertia load and rod load: what a judgement of reversal needs. */

@@ -19,12 +19,23 @@ public final class Trace {
     /** For each sample, the number of breaks passed: two samples with equal numbers have no break between them. */
     private final int[] piece;
 
+    private final int count;
+
     /**
-     * @param grid the curve at STATIONS equally spaced angles from 0
+     * @param grid the curve at equally spaced angles from 0, just after any step
      * @param breaks rad, rising, in [0, 2π); the first is 0, the shown throw's dead centre, so that no stretch runs
      *     through the seam
      */
     Trace(Curve curve, double[] grid, double[] breaks) {
+        this(curve, grid, breaks, false);
+    }
+
+    /** A trace for sign changes alone: break angles are not sampled where the curve is far from zero on both sides. */
+    static Trace ofSigns(Curve curve, double[] grid, double[] breaks) {
+        return new Trace(curve, grid, breaks, true);
+    }
+
+    private Trace(Curve curve, double[] grid, double[] breaks, boolean signsAlone) {
         if (breaks.length == 0 || breaks[0] != 0) {
             throw new IllegalArgumentException("angle 0 is not among the breaks " + Arrays.toString(breaks));
         }
@@ -38,23 +49,38 @@ public final class Trace {
         double step = Angles.TURN / grid.length;
         for (int i = 0; i < grid.length; i++) {
             double angle = i * step;
+            boolean onBreak = false;
             while (next < breaks.length && breaks[next] <= angle + Approach.TOLERANCE) {
-                at = addBreak(at, breaks[next], next);
+                if (!signsAlone || nearZero(grid, i)) {
+                    at = addBreak(at, breaks[next], next);
+                    onBreak = angle - breaks[next] < 2 * Approach.TOLERANCE;
+                }
                 next++;
             }
-            boolean onBreak = next > 0 && angle - breaks[next - 1] < 2 * Approach.TOLERANCE;
             if (!onBreak) {
                 at = add(at, angle, grid[i], next);
             }
         }
         while (next < breaks.length) {
-            at = addBreak(at, breaks[next], next);
+            if (!signsAlone || nearZero(grid, grid.length)) {
+                at = addBreak(at, breaks[next], next);
+            }
             next++;
         }
         this.count = closed(at, breaks);
     }
 
-    private final int count;
+    /** Whether a curve that runs on as it does round two stations might reach zero between them, or changes its sign. */
+    private static boolean nearZero(double[] grid, int station) {
+        int n = grid.length;
+        double before = grid[(station + n - 1) % n];
+        double after = grid[station % n];
+        double change = Math.abs(after - before);
+        double steepest = Math.max(
+                change,
+                Math.max(Math.abs(before - grid[(station + n - 2) % n]), Math.abs(grid[(station + 1) % n] - after)));
+        return before * after <= 0 || Math.min(Math.abs(before), Math.abs(after)) < 2 * steepest;
+    }
 
     /**
      * Samples a curve.

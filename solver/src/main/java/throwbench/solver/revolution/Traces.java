@@ -48,6 +48,6 @@ public final class Traces {
         return new Trace(
                 new RodLoadCurve(running, shown),
                 grid.read(Column.ROD_LOAD, new double[grid.count()]),
-                BreakAngles.ofThrow(running, shown));
+                BreakAngles.ofRodLoad(running, shown));
     }
 }

@@ -132,7 +132,7 @@ class RecordedChamberTest {
                 Rotation.COUNTER_CLOCKWISE,
                 Pumps.duty(Pumps.WATER).with(Map.of(chamber.name(), condition)));
         assertEquals(
-                List.of(new Refusal("throws[0].chambers[0].cycle.kind", sentence)),
+                List.of(new Refusal("throws[0].chambers[0].cycle", sentence)),
                 RunningMachine.settle(machine, machine.dutyPoints().get(0)).refusals());
     }
 }
