@@ -42,12 +42,15 @@ final class BandPainter {
         double from = layout.x(span.from());
         double to = layout.x(span.to());
         StripLayout.Row band = layout.band();
-        boolean said = span.asked().isEmpty() || caption(pen, span, band.height(), to - from - 10).saysAll();
+        boolean said = span.asked().isEmpty()
+                || caption(pen, span, band.height(), to - from - 10).saysAll();
         if (said) {
             return;
         }
         double left = index > 0 ? from - layout.x(plot.band().get(index - 1).from()) : 0;
-        double right = index + 1 < plot.band().size() ? layout.x(plot.band().get(index + 1).to()) - to : 0;
+        double right = index + 1 < plot.band().size()
+                ? layout.x(plot.band().get(index + 1).to()) - to
+                : 0;
         double size = Math.min(13, band.height() * 0.48);
         pen.font(size, true);
         String words = span.words().get(span.words().size() - 1) + " (" + span.asked() + ")";
@@ -56,7 +59,9 @@ final class BandPainter {
             return;
         }
         boolean after = right >= left;
-        int ground = span.inTension() ? palette.loads().compression() : palette.loads().tension();
+        int ground = span.inTension()
+                ? palette.loads().compression()
+                : palette.loads().tension();
         double start = after ? to : from - width;
         pen.fill(ground);
         pen.rect(start, band.top(), width, band.height(), 0, true, false);
