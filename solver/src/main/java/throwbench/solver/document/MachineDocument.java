@@ -1,6 +1,9 @@
 package throwbench.solver.document;
 
+import java.util.HashMap;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 import throwbench.solver.document.attached.AttachedFiles;
@@ -176,6 +179,31 @@ public final class MachineDocument {
      * @throws IllegalArgumentException when the page has no number at the place
      */
     public MachineDocument withNumber(KeyPath path, double si) {
+        return with(path, exact(path, si));
+    }
+
+    /** Several numbers at once, each as {@link #withNumber} writes it. */
+    public MachineDocument withNumbers(Map<KeyPath, Double> numbers) {
+        Map<Node, String> present = new HashMap<>();
+        Map<KeyPath, Double> missing = new LinkedHashMap<>();
+        for (Map.Entry<KeyPath, Double> number : numbers.entrySet()) {
+            KeyPath path = number.getKey();
+            Node node = PathReader.node(path, root);
+            if (node == null || node.isNest()) {
+                missing.put(path, number.getValue());
+            } else {
+                String value = exact(path, number.getValue());
+                present.put(node, Literals.json(value, PathReader.key(path, root), node));
+            }
+        }
+        MachineDocument next = present.isEmpty() ? this : of(edit().replace(present));
+        for (Map.Entry<KeyPath, Double> number : missing.entrySet()) {
+            next = next.withNumber(number.getKey(), number.getValue());
+        }
+        return next;
+    }
+
+    private String exact(KeyPath path, double si) {
         Key key = PathReader.key(path, root);
         boolean clearance = key != null && key.kind() == Kind.CLEARANCE;
         Dimension dimension = clearance
@@ -184,7 +212,7 @@ public final class MachineDocument {
         if (dimension == null) {
             throw new IllegalArgumentException("no number at " + path);
         }
-        return with(path, QuantityText.exact(si, dimension));
+        return QuantityText.exact(si, dimension);
     }
 
     private Dimension clearanceDimension(KeyPath path) {

@@ -1,6 +1,9 @@
 package throwbench.solver.document.json;
 
+import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
+import java.util.Map;
 import java.util.Objects;
 
 /** Edits of a parsed text: each gives the new text, in which nothing changed but what was asked for. */
@@ -18,6 +21,19 @@ public final class TextEdit {
     /** The text with another value in place of one. */
     public String replace(Node value, String json) {
         return splice(value.start(), value.end(), placed(json, indentAt(value.memberStart())));
+    }
+
+    /** The text with other values in place of several, each of one line; none of them lies in another. */
+    public String replace(Map<Node, String> jsonByValue) {
+        List<Node> values = new ArrayList<>(jsonByValue.keySet());
+        values.sort(Comparator.comparingInt(Node::start));
+        StringBuilder edited = new StringBuilder(text.length() + text.length() / 8);
+        int kept = 0;
+        for (Node value : values) {
+            edited.append(text, kept, value.start()).append(jsonByValue.get(value));
+            kept = value.end();
+        }
+        return edited.append(text, kept, text.length()).toString();
     }
 
     /** The text with another key before a value. */
