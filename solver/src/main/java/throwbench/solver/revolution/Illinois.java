@@ -16,7 +16,7 @@ final class Illinois {
 
     private Illinois() {}
 
-    /** @return an angle between from and to, rad */
+    /** The angle between from and to, rad, at which the curve is zero. */
     static double root(Curve curve, double from, double fromValue, double to, double toValue) {
         double a = from;
         double fa = fromValue;
