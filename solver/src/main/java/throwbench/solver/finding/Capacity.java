@@ -39,7 +39,8 @@ public final class Capacity implements StageCriterion {
         }
         StageConditions lines = duty.running().dutyPoint().stages().get(stage);
         boolean cold = lines == null || lines.suctionTemperature().isEmpty();
-        String why = cold ? "stages." + stage + ".suctionTemperature is missing at the duty point" : "its mass is not known";
+        String why =
+                cold ? "stages." + stage + ".suctionTemperature is missing at the duty point" : "its mass is not known";
         return Optional.of(Found.none(why + "; " + atInlet));
     }
 }

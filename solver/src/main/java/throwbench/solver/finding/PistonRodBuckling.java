@@ -15,8 +15,9 @@ public final class PistonRodBuckling implements ThrowCriterion {
     private static final Statement STATEMENT = Statement.atLeast(
                     LimitKey.PISTON_ROD_BUCKLING, "1", "piston rod buckling")
             .is("critical load (Euler; Johnson below the transition slenderness; pinned ends) / greatest compression")
-            .from("column formulas: T. H. Wentzell, Machine Design (2007), ex. 3.5 and 3.6, p. 53 and 55; the safety wanted is"
-                    + " the manufacturer's");
+            .from(
+                    "column formulas: T. H. Wentzell, Machine Design (2007), ex. 3.5 and 3.6, p. 53 and 55; the safety wanted is"
+                            + " the manufacturer's");
 
     @Override
     public Statement statement() {

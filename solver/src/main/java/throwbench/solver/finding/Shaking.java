@@ -34,8 +34,9 @@ public final class Shaking implements MachineCriterion {
         this.statement = Statement.atMost(key, couple ? "N m" : "N", what + ", " + rank)
                 .is("greatest size of order " + order + " of the inertia " + (couple ? "couple" : "force")
                         + " of the moving parts on the frame")
-                .from("what the foundation allows; table of forces and couples: Bloch and Hoefner, Reciprocating Compressors"
-                        + " (1996), p. 91");
+                .from(
+                        "what the foundation allows; table of forces and couples: Bloch and Hoefner, Reciprocating Compressors"
+                                + " (1996), p. 91");
         this.couple = couple;
         this.order = order;
     }
@@ -47,9 +48,8 @@ public final class Shaking implements MachineCriterion {
 
     @Override
     public Found find(JudgedDuty duty) {
-        OrderVector vector = couple
-                ? duty.harmonics().couple(order)
-                : duty.harmonics().force(order);
+        OrderVector vector =
+                couple ? duty.harmonics().couple(order) : duty.harmonics().force(order);
         double size = vector.size();
         return size <= ROUNDING * scale(duty.running())
                 ? Found.of(0).noting("cancels within the machine")

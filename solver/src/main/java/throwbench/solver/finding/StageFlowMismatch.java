@@ -45,6 +45,7 @@ public final class StageFlowMismatch implements StageCriterion {
         return Found.none(
                 known
                         ? "stage " + mismatch.stage() + " passes nothing"
-                        : "the mass that stage " + mismatch.stage() + " passes or that those behind it take in is not known");
+                        : "the mass that stage " + mismatch.stage()
+                                + " passes or that those behind it take in is not known");
     }
 }
