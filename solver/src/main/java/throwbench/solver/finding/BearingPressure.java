@@ -79,11 +79,12 @@ public final class BearingPressure implements ThrowCriterion {
     }
 
     private BearingPart part(Parts parts) {
-        Optional<BearingPart> part = switch (limitKey()) {
-            case CRANK_PIN_PRESSURE -> parts.crankPin();
-            case MAIN_BEARING_PRESSURE -> parts.mainBearing();
-            default -> parts.crosshead().map(c -> new BearingPart(c.pinDiameter(), c.pinLength()));
-        };
+        Optional<BearingPart> part =
+                switch (limitKey()) {
+                    case CRANK_PIN_PRESSURE -> parts.crankPin();
+                    case MAIN_BEARING_PRESSURE -> parts.mainBearing();
+                    default -> parts.crosshead().map(c -> new BearingPart(c.pinDiameter(), c.pinLength()));
+                };
         return part.orElse(NOTHING);
     }
 }

@@ -53,8 +53,8 @@ final class Corners {
     double count() {
         double count = ends(machine.ranges().speed()).size();
         for (StageRange range : machine.ranges().stages().values()) {
-            double discharges =
-                    ends(range.dischargePressure()).size() + (range.reliefPressure().isPresent() ? 1 : 0);
+            double discharges = ends(range.dischargePressure()).size()
+                    + (range.reliefPressure().isPresent() ? 1 : 0);
             count *= ends(range.suctionPressure()).size()
                     * (double) ends(range.suctionTemperature()).size()
                     * discharges;
@@ -138,7 +138,8 @@ final class Corners {
         StageConditions lines = new StageConditions(
                 suction.isPresent() && written.suctionPressure().isPresent() ? suction : written.suctionPressure(),
                 temperature.isPresent() ? temperature : written.suctionTemperature(),
-                discharge.isPresent() && (atRelief || written.dischargePressure().isPresent())
+                discharge.isPresent()
+                                && (atRelief || written.dischargePressure().isPresent())
                         ? discharge
                         : written.dischargePressure());
         return new Choice(names.stage(stage, suction, temperature, discharge, atRelief), lines, atRelief);
@@ -158,7 +159,10 @@ final class Corners {
         for (Stage stage : machine.stages()) {
             Choice before = stage.follows().map(chosen::get).orElse(null);
             StageConditions lines = stages.get(stage.name());
-            if (before != null && before.atRelief() && lines != null && lines.suctionPressure().isEmpty()) {
+            if (before != null
+                    && before.atRelief()
+                    && lines != null
+                    && lines.suctionPressure().isEmpty()) {
                 stages.put(
                         stage.name(),
                         new StageConditions(
@@ -177,11 +181,12 @@ final class Corners {
             boolean changed = !stage.getValue().equals(base.stages().get(stage.getKey()));
             boolean known = changed && suction.isPresent() && discharge.isPresent();
             if (known && !(discharge.getAsDouble() > suction.getAsDouble())) {
-                refusals.add(new Refusal(
-                        "ranges.stages." + stage.getKey(),
-                        names.pressure(discharge.getAsDouble()) + " of discharge with "
-                                + names.pressure(suction.getAsDouble())
-                                + " of suction at a corner; wanted is a discharge pressure above the suction pressure"));
+                refusals.add(
+                        new Refusal(
+                                "ranges.stages." + stage.getKey(),
+                                names.pressure(discharge.getAsDouble()) + " of discharge with "
+                                        + names.pressure(suction.getAsDouble())
+                                        + " of suction at a corner; wanted is a discharge pressure above the suction pressure"));
                 return false;
             }
         }

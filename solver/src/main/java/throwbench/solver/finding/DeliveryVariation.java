@@ -14,8 +14,9 @@ public final class DeliveryVariation implements StageCriterion {
 
     private static final Statement STATEMENT = Statement.atMost(LimitKey.FLOW_VARIATION, "1", "flow variation")
             .is("(greatest delivery − least delivery) / mean delivery")
-            .from("definition: Karassik and others, Pump Handbook, section on power pumps (from memory); the limit is the"
-                    + " pipework's");
+            .from(
+                    "definition: Karassik and others, Pump Handbook, section on power pumps (from memory); the limit is the"
+                            + " pipework's");
 
     @Override
     public Statement statement() {
@@ -35,7 +36,6 @@ public final class DeliveryVariation implements StageCriterion {
     }
 
     private static String note(FlowVariation v) {
-        return String.format(
-                Locale.ROOT, "%.4g %% above the mean, %.4g %% below it", 100 * v.above(), 100 * v.below());
+        return String.format(Locale.ROOT, "%.4g %% above the mean, %.4g %% below it", 100 * v.above(), 100 * v.below());
     }
 }

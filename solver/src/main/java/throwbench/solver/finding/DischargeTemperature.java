@@ -28,8 +28,9 @@ public final class DischargeTemperature implements StatedCriterion {
 
     private static final Statement STATEMENT = Statement.atMost(
                     LimitKey.DISCHARGE_TEMPERATURE, "K", "discharge temperature")
-            .is("suction temperature × (discharge pressure / suction pressure)^((n − 1)/n); with flow through valves the"
-                    + " mean by mass of what leaves")
+            .is(
+                    "suction temperature × (discharge pressure / suction pressure)^((n − 1)/n); with flow through valves the"
+                            + " mean by mass of what leaves")
             .from("API 618, 5th edition (2007), greatest predicted discharge temperature; figures from memory")
             .usually(423.15);
 
@@ -51,7 +52,8 @@ public final class DischargeTemperature implements StatedCriterion {
                             chamber.stage(),
                             Optional.of(t.described().name()),
                             Optional.of(chamber.name()));
-                    findings.add(duty.held(this, place, find(duty, chamber, t.curves().get(c), fluid)));
+                    findings.add(duty.held(
+                            this, place, find(duty, chamber, t.curves().get(c), fluid)));
                 }
             }
         }

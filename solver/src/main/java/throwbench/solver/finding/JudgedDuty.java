@@ -72,7 +72,8 @@ public final class JudgedDuty {
                 .map(Stage::name)
                 .filter(stage -> running.machine().throwsInOrder().stream()
                         .flatMap(t -> t.chambers().stream())
-                        .anyMatch(chamber -> chamber.stage().filter(stage::equals).isPresent()))
+                        .anyMatch(
+                                chamber -> chamber.stage().filter(stage::equals).isPresent()))
                 .toList();
     }
 
@@ -115,8 +116,7 @@ public final class JudgedDuty {
     Finding held(Criterion criterion, Finding.Place where, Found found) {
         OptionalDouble limit = limit(criterion, where, found.usual());
         return found.value().isPresent()
-                ? Finding.judged(
-                        criterion, where, found.value().getAsDouble(), limit, found.angle(), found.note())
+                ? Finding.judged(criterion, where, found.value().getAsDouble(), limit, found.angle(), found.note())
                 : Finding.unknown(criterion, where, limit, found.note());
     }
 

@@ -9,8 +9,7 @@ import throwbench.solver.mechanism.PistonSpeed;
  */
 public final class MeanPistonSpeed implements ThrowCriterion {
 
-    private static final Statement STATEMENT = Statement.atMost(
-                    LimitKey.MEAN_PISTON_SPEED, "m/s", "mean piston speed")
+    private static final Statement STATEMENT = Statement.atMost(LimitKey.MEAN_PISTON_SPEED, "m/s", "mean piston speed")
             .is("2 × stroke × turns a second")
             .from("the purchaser's or the manufacturer's figure, for API 618 (2007) fixes none (from memory); formula:"
                     + " Compression Machinery for Oil and Gas, p. 205");

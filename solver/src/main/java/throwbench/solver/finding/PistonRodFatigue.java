@@ -14,10 +14,10 @@ import throwbench.solver.revolution.Extremes;
  */
 public final class PistonRodFatigue implements ThrowCriterion {
 
-    private static final Statement STATEMENT = Statement.atMost(
-                    LimitKey.PISTON_ROD_FATIGUE, "1", "piston rod fatigue")
-            .is("stress concentration × stress amplitude / endurance limit + mean stress / ultimate strength, at the thread"
-                    + " root; a compressive mean counts as 0")
+    private static final Statement STATEMENT = Statement.atMost(LimitKey.PISTON_ROD_FATIGUE, "1", "piston rod fatigue")
+            .is(
+                    "stress concentration × stress amplitude / endurance limit + mean stress / ultimate strength, at the thread"
+                            + " root; a compressive mean counts as 0")
             .from("modified Goodman line: T. H. Wentzell, Machine Design (2007), ex. 5.3, p. 97")
             .usually(1);
 
@@ -44,7 +44,8 @@ public final class PistonRodFatigue implements ThrowCriterion {
         double preload = part.preload().orElse(0);
         boolean clamped = preload > 0 && preload >= tension;
         double amplitude = clamped ? 0 : (tension - load.least().value()) / 2 / area;
-        double mean = clamped ? preload / area : Math.max(0, (tension + load.least().value()) / 2 / area);
+        double mean =
+                clamped ? preload / area : Math.max(0, (tension + load.least().value()) / 2 / area);
         double use = goodman(
                 part.stressConcentration().orElseThrow() * amplitude,
                 mean,
@@ -66,8 +67,7 @@ public final class PistonRodFatigue implements ThrowCriterion {
     }
 
     private static String note(double amplitude, double mean, double preload, double tension) {
-        String stresses =
-                String.format(Locale.ROOT, "amplitude %.4g MPa, mean %.4g MPa", amplitude / 1e6, mean / 1e6);
+        String stresses = String.format(Locale.ROOT, "amplitude %.4g MPa, mean %.4g MPa", amplitude / 1e6, mean / 1e6);
         if (preload == 0) {
             return stresses + "; no credit for preload, pistonRodPart.preload being missing";
         }

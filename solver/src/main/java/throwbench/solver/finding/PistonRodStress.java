@@ -13,10 +13,10 @@ import throwbench.solver.revolution.Extremes;
  */
 public final class PistonRodStress implements ThrowCriterion {
 
-    private static final Statement STATEMENT = Statement.atMost(
-                    LimitKey.PISTON_ROD_STRESS, "Pa", "piston rod stress")
+    private static final Statement STATEMENT = Statement.atMost(LimitKey.PISTON_ROD_STRESS, "Pa", "piston rod stress")
             .is("the greater of peak tension / thread root area and peak compression / rod area")
-            .from("force over area; limited by the material's yield strength, a rating of the manufacturer goes before it");
+            .from(
+                    "force over area; limited by the material's yield strength, a rating of the manufacturer goes before it");
 
     @Override
     public Statement statement() {

@@ -7,8 +7,7 @@ import throwbench.solver.machine.LimitKey;
 public final class Power implements MachineCriterion {
 
     /** Work of the gas or liquid in all chambers, by their pressure–volume diagrams. */
-    public static final Power INDICATED = new Power(Statement.atMost(
-                    LimitKey.INDICATED_POWER, "W", "indicated power")
+    public static final Power INDICATED = new Power(Statement.atMost(LimitKey.INDICATED_POWER, "W", "indicated power")
             .is("−∮ p dV of every chamber × turns a second")
             .from("what the driver gives; definition: P. K. Nag, Basic and Applied Thermodynamics (2006), ch. 19"));
 

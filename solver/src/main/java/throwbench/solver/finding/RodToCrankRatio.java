@@ -9,8 +9,7 @@ import throwbench.solver.mechanism.Linkage;
  */
 public final class RodToCrankRatio implements ThrowCriterion {
 
-    private static final Statement STATEMENT = Statement.atLeast(
-                    LimitKey.ROD_TO_CRANK_RATIO, "1", "rod to crank ratio")
+    private static final Statement STATEMENT = Statement.atLeast(LimitKey.ROD_TO_CRANK_RATIO, "1", "rod to crank ratio")
             .is("connecting rod length / crank radius")
             .from("the designer's figure; 4 to 6 is common practice, no source");
 

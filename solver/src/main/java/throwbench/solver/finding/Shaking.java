@@ -34,8 +34,9 @@ public final class Shaking implements MachineCriterion {
         this.statement = Statement.atMost(key, couple ? "N m" : "N", what + ", " + rank)
                 .is("greatest size of order " + order + " of the inertia " + (couple ? "couple" : "force")
                         + " of the moving parts on the frame")
-                .from("what the foundation allows; table of forces and couples: Bloch and Hoefner, Reciprocating Compressors"
-                        + " (1996), p. 91");
+                .from(
+                        "what the foundation allows; table of forces and couples: Bloch and Hoefner, Reciprocating Compressors"
+                                + " (1996), p. 91");
         this.couple = couple;
         this.order = order;
     }
@@ -47,23 +48,23 @@ public final class Shaking implements MachineCriterion {
 
     @Override
     public Found find(JudgedDuty duty) {
-        OrderVector vector = couple
-                ? duty.harmonics().couple(order)
-                : duty.harmonics().force(order);
+        OrderVector vector =
+                couple ? duty.harmonics().couple(order) : duty.harmonics().force(order);
         double size = vector.size();
         return size <= ROUNDING * scale(duty.running())
                 ? Found.of(0).noting("cancels within the machine")
                 : Found.of(size).noting(direction(vector, duty.running().rotation()));
     }
 
-    private static String direction(OrderVector vector, Rotation rotation) {
+    private String direction(OrderVector vector, Rotation rotation) {
         OptionalDouble direction = vector.direction();
         if (direction.isPresent()) {
-            return String.format(
-                    Locale.ROOT,
-                    "greatest along %.1f deg from X, %.4g across it",
-                    Math.toDegrees(direction.getAsDouble()),
-                    vector.leastSize());
+            // tenths of a degree, and 180 is 0
+            double tenths = Math.rint(Math.toDegrees(direction.getAsDouble()) * 10) % 1800;
+            String along = String.format(Locale.ROOT, "greatest along %.1f deg from X, ", tenths / 10);
+            return vector.leastSize() <= ROUNDING * vector.size()
+                    ? along + "none across it"
+                    : along + String.format(Locale.ROOT, "%.4g k%s across it", vector.leastSize() / 1e3, unit());
         }
         boolean with = vector.length(rotation) >= vector.size() / 2;
         return "equally great all round, turning " + (with ? "with" : "against") + " the shaft";
