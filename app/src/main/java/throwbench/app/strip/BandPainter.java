@@ -74,7 +74,11 @@ final class BandPainter {
     private static double free(Pen pen, StripPlot plot, int index) {
         BandSpan span = plot.band().get(index);
         double width = plot.layout().x(span.to()) - plot.layout().x(span.from());
-        return (width - caption(pen, span, plot.layout().band().height(), width - 10).width()) / 2 - 6;
+        return (width
+                                - caption(pen, span, plot.layout().band().height(), width - 10)
+                                        .width())
+                        / 2
+                - 6;
     }
 
     private void arrowHead(Pen pen, double tip, double y, double length) {
