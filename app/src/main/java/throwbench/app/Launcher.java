@@ -1,7 +1,5 @@
 package throwbench.app;
 
-import java.io.FileDescriptor;
-import java.io.FileOutputStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -17,8 +15,7 @@ public final class Launcher {
     private Launcher() {}
 
     public static void main(String[] args) {
-        Terminal terminal =
-                new Terminal(new FileOutputStream(FileDescriptor.out), new FileOutputStream(FileDescriptor.err));
+        Terminal terminal = Terminal.ofProcess();
         CommandLine commandLine = new CommandLine(terminal);
         List<String> words = List.of(args);
         if (!opensWindow(commandLine, words)) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalLong;
 
 /** The words after a command: one machine file, and options with their values. */
 final class Arguments {
@@ -109,6 +110,25 @@ final class Arguments {
     /** What was given for an option. */
     Optional<String> value(Option option) {
         return Optional.ofNullable(values.get(option));
+    }
+
+    /** What was given for an option that cannot be left out; empty, and said, where it is. */
+    Optional<String> needed(Option option) {
+        Optional<String> given = value(option);
+        if (given.isEmpty()) {
+            terminal.complain("throwbench", option.word(), "is missing, " + option.value() + " is wanted");
+        }
+        return given;
+    }
+
+    /** The whole number given for an option within bounds; empty, and said, where it is none. */
+    OptionalLong whole(Option option, long otherwise, long least, long most) {
+        String given = values.getOrDefault(option, Long.toString(otherwise));
+        OptionalLong number = Whole.read(given, least, most);
+        if (number.isEmpty()) {
+            terminal.complain("throwbench", option.word(), "\"" + given + "\", " + Whole.wanted(least, most));
+        }
+        return number;
     }
 
     /** What was given for an option that has to be one of these words; the first of them where it was left out. */

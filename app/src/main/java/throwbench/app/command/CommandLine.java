@@ -15,7 +15,15 @@ public final class CommandLine {
 
     /** Every command, with a terminal to speak to. */
     public CommandLine(Terminal terminal) {
-        this(List.of(new SolveCommand(), new CheckCommand()), terminal);
+        this(
+                List.of(
+                        new SolveCommand(),
+                        new CheckCommand(),
+                        new MapCommand(),
+                        new LimitCommand(),
+                        new SensitivityCommand(),
+                        new ToleranceCommand()),
+                terminal);
     }
 
     CommandLine(List<Command> commands, Terminal terminal) {
@@ -118,7 +126,12 @@ public final class CommandLine {
         List<String> near = NearWords.of(word, known);
         return (word.startsWith("-") ? "no such option" : "no such command")
                 + (near.isEmpty() ? "; there are " : "; perhaps ")
-                + String.join(near.isEmpty() ? " and " : " or ", near.isEmpty() ? known : near);
+                + (near.isEmpty() ? listed(known) : String.join(" or ", near));
+    }
+
+    private static String listed(List<String> words) {
+        int last = words.size() - 1;
+        return String.join(", ", words.subList(0, last)) + " and " + words.get(last);
     }
 
     private String overview() {

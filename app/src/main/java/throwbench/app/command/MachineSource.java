@@ -6,23 +6,28 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import throwbench.solver.document.Fault;
+import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.MachineFile;
 import throwbench.solver.document.Reading;
+import throwbench.solver.document.attached.AttachedFiles;
 import throwbench.solver.finding.JudgedPoints;
 import throwbench.solver.machine.DutyPoint;
 import throwbench.solver.machine.Machine;
 import throwbench.solver.machine.Throw;
+import throwbench.solver.map.Subject;
 import throwbench.solver.revolution.Refusal;
 
 /** A machine that was read, with the name of its file for everything that is wrong with it. */
 final class MachineSource {
 
     private final String file;
+    private final MachineDocument document;
     private final Machine machine;
     private final Terminal terminal;
 
-    private MachineSource(String file, Machine machine, Terminal terminal) {
+    private MachineSource(String file, MachineDocument document, Machine machine, Terminal terminal) {
         this.file = file;
+        this.document = document;
         this.machine = machine;
         this.terminal = terminal;
     }
@@ -42,8 +47,35 @@ final class MachineSource {
         for (Fault fault : reading.faults()) {
             terminal.complain(file, fault.line());
         }
-        Optional<Machine> machine = reading.machine();
-        return machine.isPresent() ? Optional.of(new MachineSource(file, machine.get(), terminal)) : Optional.empty();
+        return reading.machine()
+                .map(machine -> new MachineSource(file, reading.document().orElseThrow(), machine, terminal));
+    }
+
+    /** The machine at the duty point and with the throw of the command's options; empty, and said, where there is none. */
+    Optional<Subject> subject(Arguments arguments) {
+        Optional<Integer> duty = writtenDuty(arguments.value(Option.DUTY));
+        Optional<Integer> shown = throwIndex(arguments.value(Option.THROW));
+        if (duty.isEmpty() || shown.isEmpty()) {
+            return Optional.empty();
+        }
+        AttachedFiles files = MachineFile.attachedTo(Path.of(file));
+        return Optional.of(new Subject(document, machine, files, duty.get(), shown.get()));
+    }
+
+    /** The index of a duty point of the file itself: those of its ranges have no numbers there that could be varied. */
+    private Optional<Integer> writtenDuty(Optional<String> name) {
+        List<String> written =
+                machine.dutyPoints().stream().map(DutyPoint::name).toList();
+        if (name.isEmpty() || written.contains(name.get())) {
+            return Optional.of(name.map(written::indexOf).orElse(0));
+        }
+        missing("dutyPoints", "duty point", name.get(), written);
+        return Optional.empty();
+    }
+
+    /** Says what is wrong at a place of the file. */
+    void complain(String path, String what) {
+        terminal.complain(file, path, what);
     }
 
     Machine machine() {

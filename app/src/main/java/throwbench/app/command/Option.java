@@ -6,7 +6,16 @@ enum Option {
     THROW("--throw", "NAME"),
     STATIONS("--stations", "N"),
     FORMAT("--format", "FORMAT"),
-    OUT("--out", "FILE");
+    OUT("--out", "FILE"),
+    ACROSS("--across", "KEY=FROM..TO:N"),
+    UP("--up", "KEY=FROM..TO:N"),
+    OF("--of", "RESULT"),
+    VARY("--vary", "KEY=FROM..TO"),
+    UNTIL("--until", "ID"),
+    /** Of {@code sensitivity}, which asks for a finding and not for any result. */
+    OF_FINDING("--of", "ID"),
+    SAMPLES("--samples", "N"),
+    SEED("--seed", "N");
 
     private final String word;
     private final String value;

@@ -2,6 +2,7 @@ package throwbench.app.command;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalLong;
 import throwbench.solver.document.result.RevolutionCsv;
 import throwbench.solver.document.result.RevolutionJson;
 import throwbench.solver.document.result.Written;
@@ -52,8 +53,8 @@ final class SolveCommand implements Command {
     @Override
     public ExitCode run(Arguments arguments, Terminal terminal) {
         Optional<String> format = arguments.choice(Option.FORMAT, List.of("csv", "json"));
-        int stations = stations(arguments, terminal);
-        if (format.isEmpty() || stations == 0) {
+        OptionalLong stations = arguments.whole(Option.STATIONS, DEFAULT_STATIONS, FEWEST_STATIONS, MOST_STATIONS);
+        if (format.isEmpty() || stations.isEmpty()) {
             return ExitCode.REFUSED;
         }
         Optional<MachineSource> source = MachineSource.read(arguments.machineFile(), terminal);
@@ -70,29 +71,10 @@ final class SolveCommand implements Command {
             source.get().refuse(settling.refusals());
             return ExitCode.REFUSED;
         }
-        Revolution revolution = Revolution.solve(settling.running().get(), shown.get(), stations);
+        Revolution revolution = Revolution.solve(settling.running().get(), shown.get(), (int) stations.getAsLong());
         Written result = format.get().equals("csv")
                 ? new RevolutionCsv(revolution)
                 : new RevolutionJson(revolution, Summary.of(revolution.running(), shown.get(), Optional.empty()));
         return OutputFile.deliver(result, arguments, terminal) ? ExitCode.DONE : ExitCode.REFUSED;
-    }
-
-    /** The number of stations asked for; 0, and said, where it is none of the possible ones. */
-    private static int stations(Arguments arguments, Terminal terminal) {
-        Optional<String> given = arguments.value(Option.STATIONS);
-        if (given.isEmpty()) {
-            return DEFAULT_STATIONS;
-        }
-        try {
-            int stations = Integer.parseInt(given.get());
-            if (stations >= FEWEST_STATIONS && stations <= MOST_STATIONS) {
-                return stations;
-            }
-        } catch (NumberFormatException noWholeNumber) {
-            // said below, in the same words as a number out of range
-        }
-        String wanted = "a whole number from " + FEWEST_STATIONS + " to " + MOST_STATIONS + " is wanted";
-        terminal.complain("throwbench", Option.STATIONS.word(), "\"" + given.get() + "\", " + wanted);
-        return 0;
     }
 }

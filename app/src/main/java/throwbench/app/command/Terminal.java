@@ -1,8 +1,12 @@
 package throwbench.app.command;
 
+import java.io.FileDescriptor;
+import java.io.FileOutputStream;
 import java.io.IOException;
 import java.io.OutputStream;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import throwbench.solver.document.result.Written;
 
 /** Standard output and standard error, both UTF-8. */
@@ -10,11 +14,46 @@ public final class Terminal {
 
     private final OutputStream out;
     private final OutputStream err;
+    private final boolean watched;
 
     /** Neither stream is closed, and neither needs a buffer: whole texts are handed over. */
     public Terminal(OutputStream out, OutputStream err) {
+        this(out, err, false);
+    }
+
+    /** @param watched whether somebody sees on standard error how a line changes */
+    Terminal(OutputStream out, OutputStream err, boolean watched) {
         this.out = out;
         this.err = err;
+        this.watched = watched;
+    }
+
+    /** The streams of this process. Only Linux tells whether standard error is a terminal; elsewhere none is assumed. */
+    public static Terminal ofProcess() {
+        return new Terminal(
+                new FileOutputStream(FileDescriptor.out),
+                new FileOutputStream(FileDescriptor.err),
+                isTerminal(Path.of("/proc/self/fd/2")));
+    }
+
+    /** Whether a link to an open file leads to a terminal. */
+    static boolean isTerminal(Path link) {
+        try {
+            String target = Files.readSymbolicLink(link).toString();
+            return target.startsWith("/dev/pts/") || target.startsWith("/dev/tty");
+        } catch (IOException | UnsupportedOperationException noSuchLink) {
+            return false;
+        }
+    }
+
+    /** Whether somebody sees how a line on standard error changes. */
+    boolean isWatched() {
+        return watched;
+    }
+
+    /** Writes on standard error over the line that stands there. */
+    void overwrite(String line) {
+        write("\r" + line);
     }
 
     /** Says on standard error what is wrong where: {@code file: key.path: what}. */
@@ -29,8 +68,12 @@ public final class Terminal {
 
     /** Says one line on standard error. */
     void warn(String line) {
+        write(line + "\n");
+    }
+
+    private void write(String text) {
         try {
-            err.write((line + "\n").getBytes(StandardCharsets.UTF_8));
+            err.write(text.getBytes(StandardCharsets.UTF_8));
         } catch (IOException unheard) {
             // nobody listens on standard error, and there is no third place to say so
             return;

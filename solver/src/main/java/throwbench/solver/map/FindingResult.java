@@ -45,8 +45,13 @@ public record FindingResult(Criterion criterion, boolean margin) implements Resu
                 criterion, duty.place(throwIndex), Math.toDegrees(duration), limit, OptionalDouble.empty(), "");
     }
 
+    /** The finding that counts; empty where the machine has nothing that it could be found of. */
+    public Optional<Finding> finding(RunningMachine running, int throwIndex) {
+        return worst(criterion.judge(new JudgedDuty(running)), running, throwIndex);
+    }
+
     private Outcome at(RunningMachine running, int throwIndex) {
-        Optional<Finding> worst = worst(criterion.judge(new JudgedDuty(running)), running, throwIndex);
+        Optional<Finding> worst = finding(running, throwIndex);
         return worst.isPresent()
                 ? taken(worst.get())
                 : Outcome.impossible("nothing here that " + criterion.id() + " could be found of");

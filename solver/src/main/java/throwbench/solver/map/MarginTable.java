@@ -88,14 +88,8 @@ final class MarginTable {
                 met += margins[i][sample] >= 0 ? 1 : 0;
             }
         }
-        Finding nominal = judged.get(i);
         return new ToleranceStudy.Spread(
-                nominal.criterion(),
-                nominal.where(),
-                nominal.margin().orElseThrow(),
-                met,
-                percentile(present, count, LOW),
-                percentile(present, count, HIGH));
+                judged.get(i), met, percentile(present, count, LOW), percentile(present, count, HIGH));
     }
 
     private static OptionalDouble percentile(double[] values, int count, double percent) {

@@ -51,12 +51,12 @@ final class RangeBox {
     }
 
     /** @param place in shares of each side, 0 to 1 */
-    List<Setting> settings(double[] place) {
+    List<Setting> settings(List<Double> place) {
         List<Setting> settings = new ArrayList<>(fixed);
         for (int d = 0; d < sides.size(); d++) {
             Ranges.Range range = sides.get(d).range();
-            double value =
-                    place[d] == 1 ? range.greatest() : range.least() + place[d] * (range.greatest() - range.least());
+            double share = place.get(d);
+            double value = share == 1 ? range.greatest() : range.least() + share * (range.greatest() - range.least());
             settings.add(new Setting(sides.get(d).variable(), value));
         }
         return settings;

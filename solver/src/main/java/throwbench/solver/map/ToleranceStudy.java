@@ -8,7 +8,6 @@ import java.util.SplittableRandom;
 import throwbench.solver.document.KeyPath;
 import throwbench.solver.document.NumericKey;
 import throwbench.solver.document.quantity.PressureMark;
-import throwbench.solver.finding.Criterion;
 import throwbench.solver.finding.Finding;
 import throwbench.solver.revolution.RunningMachine;
 
@@ -16,35 +15,29 @@ import throwbench.solver.revolution.RunningMachine;
  * What tolerances do to the findings of one duty point: every quantity that carries a tolerance is drawn uniformly within
  * it, each by itself, and the machine judged again for every draw.
  *
- * @param margin the nominal machine's findings that are judged, in the order of the criteria
  * @param samples number of draws
+ * @param spreads one for each judged finding of the nominal machine, in the order of the criteria
  * @param impossible number of draws that make no machine that runs; they meet nothing
  * @param reason why the first of those does not; empty where there is none
  * @param meetingAll number of draws that meet every finding
  */
-public record ToleranceStudy(int samples, List<Spread> margin, int impossible, String reason, int meetingAll) {
+public record ToleranceStudy(int samples, List<Spread> spreads, int impossible, String reason, int meetingAll) {
 
     private static final KeyPath AMBIENT = KeyPath.ROOT.key("site").key("ambientPressure");
 
     public ToleranceStudy {
-        margin = List.copyOf(margin);
+        spreads = List.copyOf(spreads);
     }
 
     /**
      * One finding over all samples.
      *
-     * @param nominal margin of the machine without tolerances
+     * @param nominal the finding of the machine without tolerances; it is judged
      * @param met number of samples that meet it
      * @param low 5th percentile of the margin over the samples that have one; empty where none has
      * @param high 95th percentile likewise
      */
-    public record Spread(
-            Criterion criterion,
-            Finding.Place where,
-            double nominal,
-            int met,
-            OptionalDouble low,
-            OptionalDouble high) {}
+    public record Spread(Finding nominal, int met, OptionalDouble low, OptionalDouble high) {}
 
     /** The numbers that carry a tolerance and can have a bearing on the duty point, in the order of the file. */
     public static List<NumericKey> toleranced(Subject subject) {

@@ -36,17 +36,13 @@ public record Variable(KeyPath path, Dimension dimension) {
             return Choice.none("no such key in this file");
         }
         if (!isNumber(key.get())) {
-            return Choice.none("holds " + said(key.get()) + ", a number is wanted");
+            return Choice.none("holds " + key.get().kind().said() + ", a number is wanted");
         }
         return Choice.of(new Variable(path, dimension(document, path, key.get())));
     }
 
     private static boolean isNumber(Key key) {
         return key.kind() == Kind.QUANTITY || key.kind() == Kind.CLEARANCE;
-    }
-
-    private static String said(Key key) {
-        return key.kind() == Kind.CHOICE ? key.wanted() : key.kind().said();
     }
 
     private static Dimension dimension(MachineDocument document, KeyPath path, Key key) {

@@ -38,8 +38,8 @@ public record WorstPoint(List<Setting> settings, Outcome margin, Outcome grid) {
         settings = List.copyOf(settings);
     }
 
-    /** A place of the box, in shares of its sides, with its margin. */
-    private record Tried(double[] place, Outcome margin) {
+    /** A point of the box with its margin. */
+    private record Tried(List<Double> place, Outcome margin) {
         double size() {
             return margin.value().orElse(NOWHERE);
         }
@@ -81,17 +81,17 @@ public record WorstPoint(List<Setting> settings, Outcome margin, Outcome grid) {
                 box.settings(worst.place()), worst.margin(), all.get(0).margin()));
     }
 
-    private static double[] gridPlace(int number, int side, int dimensions) {
-        double[] place = new double[dimensions];
+    private static List<Double> gridPlace(int number, int side, int dimensions) {
+        List<Double> place = new ArrayList<>();
         int rest = number;
         for (int d = 0; d < dimensions; d++) {
-            place[d] = (double) (rest % side) / (side - 1);
+            place.add((double) (rest % side) / (side - 1));
             rest /= side;
         }
         return place;
     }
 
-    private static Tried tried(Subject subject, Probe probe, RangeBox box, double[] place) {
+    private static Tried tried(Subject subject, Probe probe, RangeBox box, List<Double> place) {
         return new Tried(place, subject.with(box.settings(place)).ask(probe));
     }
 
@@ -115,11 +115,12 @@ public record WorstPoint(List<Setting> settings, Outcome margin, Outcome grid) {
                 new MaxEval(100 * MOST_EVALUATIONS),
                 GoalType.MINIMIZE,
                 new ObjectiveFunction(place -> {
-                    Tried here = tried(subject, probe, box, place.clone());
+                    Tried here = tried(
+                            subject, probe, box, Arrays.stream(place).boxed().toList());
                     least[0] = here.size() < least[0].size() ? here : least[0];
                     return here.size();
                 }),
-                new InitialGuess(start.place()),
+                new InitialGuess(start.place().stream().mapToDouble(x -> x).toArray()),
                 new SimpleBounds(new double[size], ones),
                 new CMAESOptimizer.Sigma(sigma),
                 new CMAESOptimizer.PopulationSize(4 + (int) (3 * Math.log(size))));

@@ -22,7 +22,7 @@ public final class RevolutionCsv implements Written {
         StringBuilder text = new StringBuilder(PIECE + PIECE / 8);
         for (int c = 0; c < table.size(); c++) {
             separate(text, c);
-            quote(table.name(c), text);
+            Csv.quote(table.name(c), text);
         }
         text.append('\n');
         for (int i = 0; i < table.stations(); i++) {
@@ -47,16 +47,5 @@ public final class RevolutionCsv implements Written {
     private static void flush(StringBuilder text, OutputStream out) throws IOException {
         out.write(text.toString().getBytes(StandardCharsets.UTF_8));
         text.setLength(0);
-    }
-
-    /** RFC 4180: a field with a comma, a quote or a line break stands in quotes, its own quotes doubled. */
-    private static void quote(String field, StringBuilder into) {
-        boolean plain =
-                field.indexOf(',') < 0 && field.indexOf('"') < 0 && field.indexOf('\n') < 0 && field.indexOf('\r') < 0;
-        if (plain) {
-            into.append(field);
-        } else {
-            into.append('"').append(field.replace("\"", "\"\"")).append('"');
-        }
     }
 }
