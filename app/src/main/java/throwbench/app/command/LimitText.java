@@ -94,17 +94,25 @@ final class LimitText implements Written {
     }
 
     private static String details(Crossing crossing, MarginWords words) {
+        Outcome below = crossing.below();
+        Outcome above = crossing.above();
+        if (!below.isPossible()) {
+            return verdict(above) + " above; not possible below: " + below.reason();
+        }
+        if (!above.isPossible()) {
+            return verdict(below) + " below; not possible above: " + above.reason();
+        }
         boolean step = crossing.kind() == Crossing.Kind.STEP;
-        return side(crossing.below(), step, words) + " below, " + side(crossing.above(), step, words) + " above";
+        return verdict(below) + (step ? " (" + margin(below, words) + ")" : "") + " below, " + verdict(above)
+                + (step ? " (" + margin(above, words) + ")" : "") + " above";
     }
 
-    private static String side(Outcome outcome, boolean step, MarginWords words) {
-        OptionalDouble margin = outcome.value();
-        if (margin.isEmpty()) {
-            return "not possible (" + outcome.reason() + ")";
-        }
-        String verdict = margin.getAsDouble() >= 0 ? "met" : "not met";
-        return step ? verdict + " (" + words.margin(margin.getAsDouble()) + ")" : verdict;
+    private static String verdict(Outcome outcome) {
+        return outcome.value().orElse(0) >= 0 ? "met" : "not met";
+    }
+
+    private static String margin(Outcome outcome, MarginWords words) {
+        return words.margin(outcome.value().orElse(0));
     }
 
     /** The margin at both ends and where it is least. */

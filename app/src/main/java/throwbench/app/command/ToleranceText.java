@@ -55,11 +55,7 @@ final class ToleranceText implements Written {
                     title, TextColumns.width(spread.nominal().criterion().title()));
         }
         int place = TextColumns.PAGE - title - 4 * NUMBER - 5 * GAP;
-        lines.add(" ".repeat(NUMBER + GAP + title + GAP)
-                + TextColumns.right("margin", NUMBER)
-                + " ".repeat(GAP)
-                + "margin that stays below it is had by");
-        lines.add(line("met by", "finding", title, List.of("nominal", "5 %", "95 %"), "", 0));
+        lines.add(line("met by", "finding", title, List.of("margin", "5 %", "95 %"), "", 0));
         for (Spread spread : study.spreads()) {
             MarginWords words = new MarginWords(spread.nominal());
             lines.add(line(
@@ -89,8 +85,9 @@ final class ToleranceText implements Written {
         return margin.isPresent() ? words.margin(margin.getAsDouble()) : "-";
     }
 
+    /** Never rounded up: all of them is said of all of them alone. */
     private static String share(double share) {
-        return BigDecimal.valueOf(100 * share).setScale(2, RoundingMode.HALF_EVEN) + " %";
+        return BigDecimal.valueOf(100 * share).setScale(2, RoundingMode.DOWN) + " %";
     }
 
     private List<String> answer() {
@@ -98,6 +95,8 @@ final class ToleranceText implements Written {
         if (study.spreads().isEmpty()) {
             sentences.add("Nothing is judged: no limit is given for what could be found.");
         } else {
+            sentences.add(
+                    "5 % and 95 %: the margins that so many of the machines stay below; margin: without tolerances.");
             sentences.add(share((double) study.meetingAll() / study.samples())
                     + " of the machines meet every judged finding.");
         }

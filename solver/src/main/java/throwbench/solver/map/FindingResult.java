@@ -58,6 +58,9 @@ public record FindingResult(Criterion criterion, boolean margin) implements Resu
     }
 
     private Outcome taken(Finding finding) {
+        if (margin && finding.value().isPresent() && finding.limit().isEmpty()) {
+            return Outcome.impossible("no limit given");
+        }
         OptionalDouble value = margin ? finding.margin() : finding.value();
         return value.isPresent() ? Outcome.of(value.getAsDouble()) : Outcome.impossible(finding.note());
     }

@@ -1,6 +1,7 @@
 package throwbench.solver.map;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.stream.IntStream;
@@ -69,6 +70,8 @@ final class MarginTable {
         for (int i = 0; i < judged.size(); i++) {
             spreads.add(spread(i));
         }
+        spreads.sort(Comparator.comparingInt(ToleranceStudy.Spread::met)
+                .thenComparingDouble(spread -> spread.low().orElse(Double.NEGATIVE_INFINITY)));
         String[] failed = IntStream.range(0, reasons.length)
                 .mapToObj(sample -> reasons[sample])
                 .filter(reason -> !reason.isEmpty())

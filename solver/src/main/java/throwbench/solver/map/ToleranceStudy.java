@@ -16,7 +16,7 @@ import throwbench.solver.revolution.RunningMachine;
  * it, each by itself, and the machine judged again for every draw.
  *
  * @param samples number of draws
- * @param spreads one for each judged finding of the nominal machine, in the order of the criteria
+ * @param spreads one for each judged finding of the nominal machine, least often met and least margin first
  * @param impossible number of draws that make no machine that runs; they meet nothing
  * @param reason why the first of those does not; empty where there is none
  * @param meetingAll number of draws that meet every finding
