@@ -22,6 +22,7 @@ import throwbench.solver.chamber.FlowValves;
 import throwbench.solver.chamber.LineConditions;
 import throwbench.solver.chamber.PressureCurve;
 import throwbench.solver.chamber.Side;
+import throwbench.solver.drive.SpeedCurve;
 import throwbench.solver.fluid.PerfectGas;
 import throwbench.solver.machine.DutyPoint;
 import throwbench.solver.machine.Machine;
@@ -113,8 +114,9 @@ public class ValveFlowBenchmark {
                 solve(crank, ChamberCondition.WORKING, CycleAccuracy.MAP));
         RunningThrow running = new RunningThrow(
                 one.described(), one.body(), one.phase(), List.of(head, crank), curves, one.uncoveredArea());
-        DutyPoint duty = Booster.duty(speed * (1 + CHANGE * call), Booster.SUCTION);
-        return Traces.of(new RunningMachine(machine, duty, List.of(running)), 0, earlier)
+        double now = speed * (1 + CHANGE * call);
+        DutyPoint duty = Booster.duty(now, Booster.SUCTION);
+        return Traces.of(new RunningMachine(machine, duty, List.of(running), SpeedCurve.constant(now)), 0, earlier)
                 .revolution();
     }
 
