@@ -16,7 +16,7 @@ final class Illinois {
 
     private Illinois() {}
 
-    /** The angle (rad) between two others at which the curve changes its sign. */
+    /** The angle between from and to, rad, at which the curve is zero. */
     static double root(Curve curve, double from, double fromValue, double to, double toValue) {
         double a = from;
         double fa = fromValue;

@@ -30,7 +30,10 @@ final class SignChanges {
         this.bottoms = new Turning(trace, -1);
         double peak = 0;
         for (int i = 0; i < trace.count(); i++) {
-            peak = Math.max(peak, Math.abs(trace.value(i)));
+            double size = Math.abs(trace.value(i));
+            if (size > peak) { // Math.max waits for itself at each step
+                peak = size;
+            }
         }
         this.zero = ROUNDING * peak;
     }

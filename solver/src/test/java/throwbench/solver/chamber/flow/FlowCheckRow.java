@@ -2,7 +2,6 @@ package throwbench.solver.chamber.flow;
 
 import java.io.IOException;
 import java.io.InputStream;
-import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Objects;
@@ -19,7 +18,7 @@ record FlowCheckRow(
         String source,
         String status) {
 
-    static List<FlowCheckRow> all() {
+    static List<FlowCheckRow> all() throws IOException {
         try (InputStream in =
                 Objects.requireNonNull(FlowCheckRow.class.getResourceAsStream("valve-flow-check-values.csv"))) {
             String text = new String(in.readAllBytes(), StandardCharsets.UTF_8);
@@ -37,8 +36,6 @@ record FlowCheckRow(
                             c[8],
                             c[9]))
                     .toList();
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
         }
     }
 

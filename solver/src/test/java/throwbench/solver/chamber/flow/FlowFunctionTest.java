@@ -4,6 +4,7 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 
+import java.io.IOException;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -11,7 +12,7 @@ import org.junit.jupiter.params.provider.MethodSource;
 
 class FlowFunctionTest {
 
-    static List<FlowCheckRow> rows() {
+    static List<FlowCheckRow> rows() throws IOException {
         return FlowCheckRow.all();
     }
 
@@ -27,7 +28,7 @@ class FlowFunctionTest {
     }
 
     @Test
-    void everyRowTellsItsSource() {
+    void everyRowTellsItsSource() throws IOException {
         assertEquals(29, rows().size());
         for (FlowCheckRow row : rows()) {
             assertFalse(row.source().isEmpty() || row.status().isEmpty(), row.id());
