@@ -17,10 +17,10 @@ import throwbench.solver.mechanism.Angles;
  */
 final class WorkingFlow {
 
-    private static final StepRule SOLVE_SUCTION = new StepRule(Math.toRadians(1.75), 2e-5, 0.06, 1.3, 3e-4);
+    private static final StepRule SOLVE_SUCTION = new StepRule(Math.toRadians(1.85), 2e-5, 0.03, 1.3, 3e-4);
 
     /** The volume is small there and changes by a greater share with every degree. */
-    private static final StepRule SOLVE_DISCHARGE = new StepRule(Math.toRadians(0.75), 2e-5, 0.06, 1.3, 3e-4);
+    private static final StepRule SOLVE_DISCHARGE = new StepRule(Math.toRadians(0.75), 2e-5, 0.05, 1.3, 3e-4);
 
     private static final StepRule MAP = new StepRule(Math.toRadians(4), 1e-4, 0.2, 1.8, 1e-2);
 
