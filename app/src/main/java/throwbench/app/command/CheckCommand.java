@@ -4,10 +4,11 @@ import java.util.List;
 import java.util.Optional;
 import throwbench.solver.document.result.FindingsJson;
 import throwbench.solver.document.result.Written;
+import throwbench.solver.finding.JudgedPoints;
 import throwbench.solver.finding.Judgement;
 import throwbench.solver.machine.DutyPoint;
 
-/** {@code check}: judges a machine against its limits at one duty point or at all of them. */
+/** {@code check}: judges a machine against its limits at one duty point or at all of them, those of its ranges included. */
 final class CheckCommand implements Command {
 
     @Override
@@ -25,7 +26,8 @@ final class CheckCommand implements Command {
         return """
                 Judges a machine against its limits. The exit code is 0 when every judged finding is met, else 1.
 
-                  --duty NAME         the duty point; all of them if left out
+                  --duty NAME         the duty point, or a load step at a corner of the ranges by its whole name; all
+                                      of them if left out
                   --format text|json  for people or for programs; text if left out
                 """;
     }
@@ -50,8 +52,12 @@ final class CheckCommand implements Command {
         if (duty.isEmpty()) {
             return ExitCode.REFUSED;
         }
-        List<DutyPoint> duties =
-                name.isPresent() ? List.of(duty.get()) : source.get().machine().dutyPoints();
+        JudgedPoints points = source.get().points();
+        if (name.isEmpty() && !points.refusals().isEmpty()) {
+            source.get().refuse(points.refusals());
+            return ExitCode.REFUSED;
+        }
+        List<DutyPoint> duties = name.isPresent() ? List.of(duty.get()) : points.points();
         return judge(source.get(), duties, format.get(), terminal);
     }
 

@@ -8,6 +8,7 @@ import java.util.Optional;
 import throwbench.solver.document.Fault;
 import throwbench.solver.document.MachineFile;
 import throwbench.solver.document.Reading;
+import throwbench.solver.finding.JudgedPoints;
 import throwbench.solver.machine.DutyPoint;
 import throwbench.solver.machine.Machine;
 import throwbench.solver.machine.Throw;
@@ -49,13 +50,18 @@ final class MachineSource {
         return machine;
     }
 
+    /** Every duty point that is judged: the written ones and those of the load steps and ranges. */
+    JudgedPoints points() {
+        return JudgedPoints.of(machine);
+    }
+
     /** The duty point of this name, or the first where none is given; empty, and said, where there is no such one. */
     Optional<DutyPoint> duty(Optional<String> name) {
         if (name.isEmpty()) {
             return Optional.of(machine.dutyPoints().get(0));
         }
         List<String> existing = new ArrayList<>();
-        for (DutyPoint duty : machine.dutyPoints()) {
+        for (DutyPoint duty : points().points()) {
             if (duty.name().equals(name.get())) {
                 return Optional.of(duty);
             }

@@ -1,5 +1,6 @@
 package throwbench.app.linkage;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import throwbench.app.bench.Shown;
@@ -37,10 +38,13 @@ public final class LinkagePicture {
      * @param framing where the machine stands; empty: the whole machine in the middle
      * @param before the picture that held until now: what can stay where it is stays there
      * @param held a design drawn as a ghost under the present one
+     * @param taken a rectangle that something else covers: no label goes there
      */
-    record Standing(Optional<Framing> framing, Optional<LinkagePicture> before, Optional<Shown> held) {
+    record Standing(
+            Optional<Framing> framing, Optional<LinkagePicture> before, Optional<Shown> held, Optional<Box> taken) {
 
-        static final Standing ALONE = new Standing(Optional.empty(), Optional.empty(), Optional.empty());
+        static final Standing ALONE =
+                new Standing(Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty());
     }
 
     /**
@@ -69,13 +73,9 @@ public final class LinkagePicture {
         Scene scene = new Scene(shown, layout, this.framing, palette, choice, size, ghost);
         this.still = new StillPainter(scene, forceScale, force, pen);
         this.headline = new Headline(scene, pen, still.legendBox().x() - 10 * size.weight());
-        LabelPlan plan = LabelPlan.of(
-                scene,
-                peaks,
-                forceScale,
-                pen,
-                List.of(headline.box(), still.legendBox(), still.footBox()),
-                before.map(b -> b.moving.plan()));
+        List<Box> taken = new ArrayList<>(List.of(headline.box(), still.legendBox(), still.footBox()));
+        standing.taken().ifPresent(taken::add);
+        LabelPlan plan = LabelPlan.of(scene, peaks, forceScale, pen, taken, before.map(b -> b.moving.plan()));
         this.moving = new MovingPainter(scene, peaks, forceScale, plan, pen);
         this.movingBox = plan.movingBox();
     }

@@ -37,6 +37,7 @@ public final class LinkageView extends Region implements View {
     private final FxPen movingPen = new FxPen(movingCanvas.getGraphicsContext2D());
     private final FxPen headlinePen = new FxPen(headlineCanvas.getGraphicsContext2D());
     private final HoverLabel hoverLabel = new HoverLabel();
+    private final LinkageMenu menu;
     private final Playhead playhead;
     private final ObjectProperty<EnumSet<ForceKind>> kinds =
             new SimpleObjectProperty<>(this, "kinds", ForceKind.usual());
@@ -55,7 +56,8 @@ public final class LinkageView extends Region implements View {
     public LinkageView(Playhead playhead) {
         this.playhead = playhead;
         getStyleClass().add("linkage-view");
-        getChildren().addAll(stillCanvas, movingCanvas, headlineCanvas, hoverLabel);
+        menu = new LinkageMenu(this);
+        getChildren().addAll(stillCanvas, movingCanvas, headlineCanvas, menu, hoverLabel);
         setMinSize(120, 90);
         setFocusTraversable(true);
         setAccessibleRole(AccessibleRole.IMAGE_VIEW);
@@ -174,6 +176,7 @@ public final class LinkageView extends Region implements View {
     }
 
     private LinkagePicture settle(Shown state, double width, double height) {
+        menu.stand(width, height, PictureSize.of(width, height, typeScale.get()).border());
         LinkageChoice choice = new LinkageChoice(kinds.get(), arrowFactor.get(), alone.get(), typeScale.get(), true);
         LinkagePicture next = new LinkagePicture(
                 state,
@@ -182,7 +185,10 @@ public final class LinkageView extends Region implements View {
                 PictureSize.of(width, height, choice.typeScale()),
                 stillPen,
                 new LinkagePicture.Standing(
-                        ownFraming, Optional.ofNullable(picture).filter(p -> follows(p, state)), held));
+                        ownFraming,
+                        Optional.ofNullable(picture).filter(p -> follows(p, state)),
+                        held,
+                        Optional.of(menuBox())));
         picture = next;
         place(stillCanvas, new Box(0, 0, width, height));
         clear(stillCanvas);
@@ -191,6 +197,11 @@ public final class LinkageView extends Region implements View {
         place(headlineCanvas, next.headlineBox());
         stale = false;
         return next;
+    }
+
+    /** Where the menu stands: no label goes there. */
+    private Box menuBox() {
+        return new Box(menu.getLayoutX(), menu.getLayoutY(), menu.getWidth(), menu.getHeight());
     }
 
     /** Whether a state is another one of the same throw, whose drawing had better not jump. */

@@ -25,6 +25,9 @@ final class StillPainter {
 
     private static final String HINT = "drag the crank pin to turn · wheel zooms · click an arrow for its trace";
 
+    /** Width left free for the menu beside the hint, points. */
+    private static final double MENU = 110;
+
     private static final int SHADES = 28;
 
     private final Scene scene;
@@ -52,7 +55,7 @@ final class StillPainter {
         legendBox = new Box(scene.size().width() - border - narrow, 14 * w, narrow, 28 * w);
         double foot = forceScale.barLength() + 10 * w + pen.width(force.text(forceScale.bar()));
         double hint = pen.width(HINT) + 28 * w;
-        hintFits = scene.choice().hint() && foot + hint < scene.size().width() - 2 * border;
+        hintFits = scene.choice().hint() && foot + hint < scene.size().width() - 2 * border - MENU;
         footBox = new Box(border, scene.size().height() - 26 * w, hintFits ? foot + hint : foot, 20 * w);
     }
 

@@ -29,7 +29,62 @@ final class BandPainter {
             pen.rect(from, layout.band().top(), to - from, layout.band().height(), 0, true, false);
             words(pen, layout.band(), span, from, to, palette);
         }
+        for (int i = 0; i < plot.band().size(); i++) {
+            callOut(pen, plot, i, palette);
+        }
         edges(pen, plot, palette);
+    }
+
+    /** The span that counts always carries its degrees and what is asked: beside it where it is too narrow itself. */
+    private void callOut(Pen pen, StripPlot plot, int index, Palette palette) {
+        BandSpan span = plot.band().get(index);
+        StripLayout layout = plot.layout();
+        double from = layout.x(span.from());
+        double to = layout.x(span.to());
+        StripLayout.Row band = layout.band();
+        boolean said = span.asked().isEmpty()
+                || caption(pen, span, band.height(), to - from - 10).saysAll();
+        if (said) {
+            return;
+        }
+        double left = index > 0 ? free(pen, plot, index - 1) : 0;
+        double right = index + 1 < plot.band().size() ? free(pen, plot, index + 1) : 0;
+        double size = Math.min(13, band.height() * 0.48);
+        pen.font(size, true);
+        String words = span.words().get(span.words().size() - 1) + " (" + span.asked() + ")";
+        double width = pen.width(words) + 2.4 * size;
+        if (width > Math.max(left, right)) {
+            return;
+        }
+        boolean after = right >= left;
+        int ground = span.inTension()
+                ? palette.loads().compression()
+                : palette.loads().tension();
+        double start = after ? to : from - width;
+        pen.fill(ground);
+        pen.rect(start, band.top(), width, band.height(), 0, true, false);
+        pen.fill(palette.ground().onAccent());
+        double tip = after ? to + 0.5 * size : from - 0.5 * size;
+        arrowHead(pen, tip, band.middle(), after ? size * 0.6 : -size * 0.6);
+        double base = band.middle() + size * 0.36;
+        pen.text(words, after ? tip + size : tip - size, base, after ? Pen.Align.LEFT : Pen.Align.RIGHT);
+    }
+
+    /** What a span's own words leave free on either side of them. */
+    private static double free(Pen pen, StripPlot plot, int index) {
+        BandSpan span = plot.band().get(index);
+        double width = plot.layout().x(span.to()) - plot.layout().x(span.from());
+        return (width - caption(pen, span, plot.layout().band().height(), width - 10).width()) / 2 - 6;
+    }
+
+    private void arrowHead(Pen pen, double tip, double y, double length) {
+        px[0] = tip;
+        py[0] = y;
+        px[1] = tip + length;
+        py[1] = y - Math.abs(length) * 0.6;
+        px[2] = px[1];
+        py[2] = y + Math.abs(length) * 0.6;
+        pen.polygon(px, py, 3, true, false);
     }
 
     /** Lines where the sign changes, down through everything, with a light gap between the spans of the band. */
@@ -48,7 +103,13 @@ final class BandPainter {
     }
 
     /** How a span's words stand: on one line, or what is asked on a second one. */
-    private record Caption(String first, String second, double size, double width) {}
+    private record Caption(String first, String second, double size, double width) {
+
+        /** Whether what is asked is among the words. */
+        boolean saysAll() {
+            return !second.isEmpty() || first.endsWith(")");
+        }
+    }
 
     private static Caption caption(Pen pen, BandSpan span, double height, double room) {
         double full = Math.min(14, height * 0.52);

@@ -6,12 +6,19 @@ import java.util.Optional;
 import javafx.scene.control.Alert;
 import javafx.scene.control.ButtonBar;
 import javafx.scene.control.ButtonType;
+import javafx.scene.control.DialogPane;
+import javafx.scene.control.Label;
+import javafx.scene.layout.GridPane;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
 import javafx.stage.FileChooser;
 import javafx.stage.Window;
 import org.jspecify.annotations.Nullable;
 
 /** The system's file chooser and the window's own questions. */
 final class RealDialogs implements Dialogs {
+
+    private static final double TEXT_WIDTH = 520;
 
     private final Window owner;
 
@@ -65,11 +72,37 @@ final class RealDialogs implements Dialogs {
         alert.initOwner(owner);
         alert.setTitle(title);
         alert.setHeaderText(title);
-        alert.setContentText(text);
         alert.setGraphic(null);
-        alert.getDialogPane().setPrefWidth(560);
-        alert.getDialogPane().getStylesheets().setAll(owner.getScene().getStylesheets());
-        alert.getDialogPane().setStyle(owner.getScene().getRoot().getStyle());
+        DialogPane pane = alert.getDialogPane();
+        pane.getStylesheets().setAll(owner.getScene().getStylesheets());
+        pane.setContent(content(text));
+        pane.setMinHeight(Region.USE_PREF_SIZE);
         return alert;
+    }
+
+    /** Paragraphs; lines with a tab are rows of two columns. */
+    private static VBox content(String text) {
+        VBox box = new VBox(8);
+        GridPane rows = new GridPane();
+        rows.setHgap(22);
+        rows.setVgap(5);
+        for (String line : text.split("\n", -1)) {
+            int tab = line.indexOf('\t');
+            if (tab >= 0) {
+                Label key = new Label(line.substring(0, tab));
+                key.setStyle("-fx-font-weight: bold;");
+                rows.addRow(rows.getRowCount(), key, new Label(line.substring(tab + 1)));
+            } else if (!line.isBlank()) {
+                Label paragraph = new Label(line);
+                paragraph.setWrapText(true);
+                paragraph.setMaxWidth(TEXT_WIDTH);
+                paragraph.setMinHeight(Region.USE_PREF_SIZE);
+                box.getChildren().add(paragraph);
+            }
+        }
+        if (rows.getRowCount() > 0) {
+            box.getChildren().add(rows);
+        }
+        return box;
     }
 }

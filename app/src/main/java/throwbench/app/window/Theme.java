@@ -3,6 +3,9 @@ package throwbench.app.window;
 import atlantafx.base.theme.PrimerDark;
 import atlantafx.base.theme.PrimerLight;
 import java.net.URL;
+import java.nio.charset.StandardCharsets;
+import java.util.Base64;
+import java.util.List;
 import java.util.Objects;
 import javafx.application.Application;
 import javafx.scene.Scene;
@@ -29,10 +32,20 @@ enum Theme {
     }
 
     void apply(Scene scene) {
-        // the roles first: the sheets look them up
-        scene.getRoot().setStyle(PaletteStyle.of(palette));
         Application.setUserAgentStylesheet(userAgentStylesheet);
-        scene.getStylesheets().setAll(sheet("controlsfx-bridge.css"), sheet("bench.css"));
+        scene.getStylesheets().setAll(sheets());
+    }
+
+    /** Every style sheet of a window or dialog. */
+    List<String> sheets() {
+        return List.of(roles(), sheet("controlsfx-bridge.css"), sheet("bench.css"));
+    }
+
+    /** The palette as a sheet of looked-up colours: menus and tooltips, which have roots of their own, find them too. */
+    private String roles() {
+        String text = ".root { " + PaletteStyle.of(palette) + "}";
+        String encoded = Base64.getEncoder().encodeToString(text.getBytes(StandardCharsets.UTF_8));
+        return "data:text/css;charset=utf-8;base64," + encoded;
     }
 
     private static String sheet(String name) {

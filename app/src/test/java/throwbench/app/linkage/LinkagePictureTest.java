@@ -312,7 +312,7 @@ class LinkagePictureTest {
                 LinkageChoice.usual(),
                 size,
                 pen,
-                new LinkagePicture.Standing(Optional.empty(), Optional.of(first), Optional.empty()));
+                new LinkagePicture.Standing(Optional.empty(), Optional.of(first), Optional.empty(), Optional.empty()));
         assertEquals(first.framing(), next.framing());
         for (int i = 0; i < first.moving().plan().arrows().size(); i++) {
             Box before = first.moving().plan().arrows().get(i).orElseThrow().box();

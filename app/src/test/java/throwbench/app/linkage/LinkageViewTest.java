@@ -10,6 +10,9 @@ import java.util.List;
 import javafx.geometry.Point2D;
 import javafx.scene.Scene;
 import javafx.scene.canvas.Canvas;
+import javafx.scene.control.CheckBox;
+import javafx.scene.control.CustomMenuItem;
+import javafx.scene.control.MenuItem;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
 import javafx.scene.input.ScrollEvent;
@@ -327,6 +330,41 @@ class LinkageViewTest {
         robot.interact(() -> view.kinds().set(EnumSet.of(ForceKind.GUIDE)));
         frame(robot);
         assertEquals(1, view.picture().orElseThrow().moving().arrowSet().size());
+    }
+
+    @Test
+    void theMenuOffersEveryKindAndTheThrows(FxRobot robot) {
+        LinkageMenu menu = robot.lookup("#linkage-menu").queryAs(LinkageMenu.class);
+        List<CheckBox> boxes = menu.getItems().stream()
+                .filter(CustomMenuItem.class::isInstance)
+                .map(i -> ((CustomMenuItem) i).getContent())
+                .filter(CheckBox.class::isInstance)
+                .map(CheckBox.class::cast)
+                .toList();
+        for (ForceKind kind : ForceKind.values()) {
+            CheckBox box = boxes.stream()
+                    .filter(b -> b.getText().equals(kind.label()))
+                    .findFirst()
+                    .orElseThrow();
+            boolean before = view.kinds().get().contains(kind);
+            assertEquals(before, box.isSelected(), kind.label());
+            robot.interact(box::fire);
+            assertEquals(!before, view.kinds().get().contains(kind), kind.label());
+        }
+        robot.interact(() -> boxes.get(boxes.size() - 1).fire());
+        assertTrue(view.alone().get());
+        robot.interact(() -> menu.getItems().stream()
+                .filter(i -> "longer arrows".equals(i.getText()))
+                .forEach(MenuItem::fire));
+        assertEquals(1.25, view.arrowFactor().get());
+    }
+
+    @Test
+    void theLastKindMayBeSwitchedOff(FxRobot robot) {
+        robot.interact(() -> view.kinds().set(EnumSet.noneOf(ForceKind.class)));
+        frame(robot);
+        assertEquals(0, view.picture().orElseThrow().moving().arrowSet().size());
+        assertEquals(0, view.picture().orElseThrow().forceScale().bar());
     }
 
     @Test

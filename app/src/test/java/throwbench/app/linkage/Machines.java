@@ -7,6 +7,7 @@ import java.util.OptionalDouble;
 import throwbench.app.bench.Shown;
 import throwbench.solver.chamber.Clearance;
 import throwbench.solver.chamber.IdealValves;
+import throwbench.solver.chamber.LiquidValves;
 import throwbench.solver.chamber.Side;
 import throwbench.solver.document.MachineDocument;
 import throwbench.solver.document.attached.AttachedFiles;
@@ -123,12 +124,8 @@ final class Machines {
     }
 
     static Shown shown(Machine machine, int throwIndex) {
-        // the pressures of a pump are those of a gas here: what is drawn depends on them alone
-        Machine solved = machine(machine.name(), machine.drive().rotation(), machine.throwsInOrder());
-        RunningMachine settled =
-                RunningMachine.settle(solved, solved.dutyPoints().get(0)).get();
         RunningMachine running =
-                new RunningMachine(machine, machine.dutyPoints().get(0), settled.throwsInOrder(), settled.speedCurve());
+                RunningMachine.settle(machine, machine.dutyPoints().get(0)).get();
         Summary summary = Summary.of(running, throwIndex, Optional.empty());
         // these machines come from no file; the view reads nothing of it
         MachineDocument none =
@@ -161,7 +158,16 @@ final class Machines {
                 0,
                 new Linkage(0.06, 0.33, 0),
                 new ReciprocatingMasses(18, 0, 25),
-                List.of(chamber("barrel " + name, Side.HEAD, 0.09, 0, 0.3)));
+                List.of(new Chamber(
+                        "barrel " + name,
+                        Side.HEAD,
+                        Optional.of("first"),
+                        0.09,
+                        0,
+                        new Clearance(0.3, true),
+                        new LiquidValves(0.2e5, 0.4e5, false, Math.toRadians(4)),
+                        0,
+                        Limits.NONE)));
     }
 
     private static Chamber chamber(String name, Side side, double bore, double inner, double clearance) {

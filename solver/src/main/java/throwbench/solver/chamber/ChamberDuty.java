@@ -1,5 +1,6 @@
 package throwbench.solver.chamber;
 
+import throwbench.solver.chamber.flow.PistonPath;
 import throwbench.solver.fluid.Fluid;
 import throwbench.solver.mechanism.Linkage;
 import throwbench.solver.mechanism.Rotation;
@@ -10,6 +11,7 @@ import throwbench.solver.mechanism.Rotation;
  * @param volume with a clearance above 0
  * @param meanSpeed of the shaft, rad/s: cycles run at the constant mean speed
  * @param flowAllowance share of the capacity lost to heating, leakage and slip
+ * @param accuracy how closely an integrated cycle is followed
  */
 public record ChamberDuty(
         Linkage linkage,
@@ -19,7 +21,8 @@ public record ChamberDuty(
         LineConditions lines,
         ChamberCondition condition,
         double meanSpeed,
-        double flowAllowance) {
+        double flowAllowance,
+        CycleAccuracy accuracy) {
 
     public ChamberDuty {
         if (!(volume.clearance() > 0)) {
@@ -27,10 +30,34 @@ public record ChamberDuty(
         }
     }
 
+    /** To be solved with full accuracy. */
+    public ChamberDuty(
+            Linkage linkage,
+            Rotation rotation,
+            ChamberVolume volume,
+            Fluid fluid,
+            LineConditions lines,
+            ChamberCondition condition,
+            double meanSpeed,
+            double flowAllowance) {
+        this(linkage, rotation, volume, fluid, lines, condition, meanSpeed, flowAllowance, CycleAccuracy.SOLVE);
+    }
+
+    /** The same duty, followed as closely as asked. */
+    public ChamberDuty followed(CycleAccuracy closely) {
+        return new ChamberDuty(linkage, rotation, volume, fluid, lines, condition, meanSpeed, flowAllowance, closely);
+    }
+
     /** The crank angle (rad) at which the chamber has a volume (m³), on the stroke on which it grows or falls. */
     double crankAngleAt(double chamberVolume, boolean growing) {
         Linkage.TravelAngles angles = linkage.anglesAtTravel(volume.travelAt(chamberVolume), rotation);
         return volume.growsOn(true) == growing ? angles.inward() : angles.outward();
+    }
+
+    /** The way of its volume, to be followed in small steps. */
+    PistonPath pistonPath() {
+        double growth = volume.side() == Side.HEAD ? volume.area() : -volume.area();
+        return new PistonPath(linkage, rotation, volume.at(0), growth);
     }
 
     /** The crank angle (rad, in [0, 2π)) of the chamber's least volume. */

@@ -15,6 +15,6 @@ public record FlowValves(double suctionFlowArea, double dischargeFlowArea) imple
 
     @Override
     public CycleOutcome solve(ChamberDuty duty) {
-        return CycleOutcome.refused("valve-flow cycles are not solved by this version; use ideal-valves");
+        return FlowValveCycle.solve(this, duty);
     }
 }

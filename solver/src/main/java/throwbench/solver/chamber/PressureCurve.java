@@ -1,6 +1,7 @@
 package throwbench.solver.chamber;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** A solved cycle: the chamber's pressure at any crank angle, and what it passes in a turn. Immutable. */
@@ -25,14 +26,22 @@ public interface PressureCurve {
         return true;
     }
 
-    /** Mass passed in a turn, kg, flow allowance taken off; empty where it is not known, which a note then explains. */
+    /**
+     * Mass passed in a turn, kg; empty where it is not known, which a note then explains. The flow allowance is taken off,
+     * except from valve flow, where it is the net suction flow itself.
+     */
     OptionalDouble massPerTurn();
 
     /** The same at suction line conditions, m³; 0 when no valve opens, and without meaning where the flow is not known. */
     double inletVolumePerTurn();
 
-    /** Temperature of what is discharged, K; empty where nothing is, or where it is not known. */
+    /** Temperature of what is discharged, K, its mean by mass; empty where nothing is, or where it is not known. */
     OptionalDouble dischargeTemperature();
+
+    /** Work that the valves cost in a turn; empty where a cycle does not follow their flow. */
+    default Optional<ValveLossWork> valveLossWork() {
+        return Optional.empty();
+    }
 
     /** What a user must be told of this cycle, in sentences without the chamber's name. */
     List<String> notes();

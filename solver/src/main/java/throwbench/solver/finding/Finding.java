@@ -31,6 +31,16 @@ public record Finding(
         public static Place ofThrow(String duty, String throwName) {
             return new Place(duty, Optional.empty(), Optional.of(throwName), Optional.empty());
         }
+
+        /** The whole machine at a duty point. */
+        public static Place ofMachine(String duty) {
+            return new Place(duty, Optional.empty(), Optional.empty(), Optional.empty());
+        }
+
+        /** A stage at a duty point. */
+        public static Place ofStage(String duty, String stage) {
+            return new Place(duty, Optional.of(stage), Optional.empty(), Optional.empty());
+        }
     }
 
     /** Holds a value against a limit; without a limit it is reported and not judged. A value met exactly is met. */
@@ -59,6 +69,12 @@ public record Finding(
                 angle,
                 room >= 0 ? Verdict.MET : Verdict.NOT_MET,
                 allowed == 0 ? join(note, "margin is the difference, the limit being 0") : note);
+    }
+
+    /** Not judged, since the value is not known; the reason says what is missing. */
+    public static Finding unknown(Criterion criterion, Place where, OptionalDouble limit, String reason) {
+        OptionalDouble none = OptionalDouble.empty();
+        return new Finding(criterion, where, none, limit, none, none, Verdict.NOT_JUDGED, reason);
     }
 
     private static String join(String note, String more) {

@@ -2,7 +2,9 @@ package throwbench.solver.finding;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Set;
 import throwbench.solver.machine.DutyPoint;
 import throwbench.solver.machine.Machine;
 import throwbench.solver.revolution.Refusal;
@@ -23,7 +25,29 @@ public record Judgement(List<Finding> findings, List<Refusal> refusals) {
             PeakLoad.ROD_TENSION,
             PeakLoad.ROD_COMPRESSION,
             new ReversalDuration(),
-            new ReversalRatio());
+            new ReversalRatio(),
+            new DischargeTemperature(),
+            new MeanPistonSpeed(),
+            new RodToCrankRatio(),
+            BearingPressure.CROSSHEAD_PIN,
+            BearingPressure.CRANK_PIN,
+            BearingPressure.MAIN_BEARING,
+            new GuidePressure(),
+            new PistonRodStress(),
+            new PistonRodFatigue(),
+            new PistonRodBuckling(),
+            new SpeedFluctuation(),
+            new PeakToMeanTorque(),
+            new SuctionHeadToSpare(),
+            new DeliveryVariation(),
+            new Capacity(),
+            new StageFlowMismatch(),
+            Power.INDICATED,
+            Power.SHAFT,
+            Shaking.FORCE_PRIMARY,
+            Shaking.FORCE_SECONDARY,
+            Shaking.COUPLE_PRIMARY,
+            Shaking.COUPLE_SECONDARY);
 
     /** A finding that was not judged stands behind every judged one. */
     private static final Comparator<Finding> WORST_FIRST =
@@ -34,17 +58,27 @@ public record Judgement(List<Finding> findings, List<Refusal> refusals) {
         refusals = List.copyOf(refusals);
     }
 
-    /** Judges a machine at these of its duty points. */
+    /** Judges a machine at these duty points, its own or others, on every core; the order is the same each time. */
     public static Judgement of(Machine machine, List<DutyPoint> duties) {
+        List<Judgement> each =
+                duties.parallelStream().map(duty -> at(machine, duty)).toList();
         List<Finding> findings = new ArrayList<>();
-        List<Refusal> refusals = new ArrayList<>();
-        for (DutyPoint duty : duties) {
-            Settling settling = RunningMachine.settle(machine, duty);
-            settling.running().ifPresent(running -> findings.addAll(at(running)));
-            settling.refusals().stream().filter(r -> !refusals.contains(r)).forEach(refusals::add);
+        Set<Refusal> refusals = new LinkedHashSet<>();
+        for (Judgement one : each) {
+            findings.addAll(one.findings());
+            refusals.addAll(one.refusals());
         }
         findings.sort(WORST_FIRST);
-        return new Judgement(findings, refusals);
+        return new Judgement(findings, List.copyOf(refusals));
+    }
+
+    private static Judgement at(Machine machine, DutyPoint duty) {
+        Settling settling = RunningMachine.settle(machine, duty);
+        boolean written = machine.dutyPoints().contains(duty);
+        List<Refusal> refusals = settling.refusals().stream()
+                .map(r -> written ? r : new Refusal(r.path(), r.sentence() + " (at \"" + duty.name() + "\")"))
+                .toList();
+        return new Judgement(settling.running().map(Judgement::at).orElse(List.of()), refusals);
     }
 
     private static List<Finding> at(RunningMachine running) {

@@ -62,40 +62,18 @@ public record Summary(
         for (int i = 0; i < running.throwsInOrder().size(); i++) {
             means.add(new TurnMeans(running, i));
         }
+        MachineMeans machine = MachineMeans.of(running, means);
         return new Summary(
                 traces.revolution(),
                 extremes,
                 List.copyOf(pressures),
                 Reversal.of(Traces.rodLoad(traces.revolution())),
                 means.get(shown).torque(),
-                means.stream().mapToDouble(TurnMeans::torque).sum(),
-                flows(running, shown, means.get(shown)),
-                machineFlows(running, means),
+                machine.shaftTorque(),
+                MachineMeans.ofThrow(running, shown, means.get(shown)),
+                machine.flow(),
                 MachineHarmonics.of(running),
                 Notes.of(running, shown));
-    }
-
-    private static StageFlows flows(RunningMachine running, int index, TurnMeans means) {
-        return new StageFlows(
-                means.powerByStage(),
-                TurnMeans.capacityByStage(running, index),
-                TurnMeans.inletVolumeByStage(running, index),
-                means.power());
-    }
-
-    private static StageFlows machineFlows(RunningMachine running, List<TurnMeans> means) {
-        StageFlows sum = flows(running, 0, means.get(0));
-        for (int i = 1; i < means.size(); i++) {
-            sum = add(sum, flows(running, i, means.get(i)));
-        }
-        return sum;
-    }
-
-    private static StageFlows add(StageFlows a, StageFlows b) {
-        b.indicatedPower().forEach((stage, power) -> a.indicatedPower().merge(stage, power, Double::sum));
-        b.inletVolume().forEach((stage, volume) -> a.inletVolume().merge(stage, volume, TurnMeans::sum));
-        b.capacity().forEach((stage, mass) -> a.capacity().merge(stage, mass, TurnMeans::sum));
-        return new StageFlows(a.indicatedPower(), a.capacity(), a.inletVolume(), a.totalPower() + b.totalPower());
     }
 
     public RunningMachine running() {

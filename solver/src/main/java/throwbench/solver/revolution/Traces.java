@@ -32,6 +32,21 @@ public final class Traces {
         return new Trace((angle, side) -> instant.turnTo(angle, side).at(column), grid.read(column, values), breaks);
     }
 
+    /** The size of a force of the shown throw that two columns hold the components of, without its direction. */
+    public Trace size(Column x, Column y) {
+        grid.read(x, values);
+        for (int i = 0; i < values.length; i++) {
+            values[i] = Math.hypot(values[i], grid.at(y, i));
+        }
+        return new Trace(
+                (angle, side) -> {
+                    instant.turnTo(angle, side);
+                    return Math.hypot(instant.at(x), instant.at(y));
+                },
+                values,
+                breaks);
+    }
+
     /** The pressure in a chamber of the shown throw. */
     public Trace pressure(int chamber) {
         int shown = grid.shownThrow();

@@ -46,7 +46,11 @@ public final class ArrowPainter {
         ux = (toX - fromX) / length;
         uy = (toY - fromY) / length;
         switch (kind) {
-            case GAS -> shaftAndHead(3.2, 12, 6, colour, ground, false);
+            case GAS -> {
+                // it lies on a chamber filled in its own hue
+                halo(6, 12, 6, ground);
+                shaftAndHead(3.2, 12, 6, colour, ground, false);
+            }
             case INERTIA -> shaftAndHead(2.4, 12, 5.5, colour, ground, true);
             case ROD_INERTIA -> {
                 dashed(2, 11, colour);
@@ -104,6 +108,16 @@ public final class ArrowPainter {
         head(head, half, colour, ground, hollow);
     }
 
+    /** Ground colour under and round an arrow. */
+    private void halo(double width, double head, double half, int ground) {
+        double h = headLength(head);
+        pen.stroke(ground, width * weight);
+        shaft(0, length - 0.8 * h, 0);
+        corners(head, half);
+        pen.stroke(ground, 3 * weight);
+        pen.polygon(x, y, 3, false, true);
+    }
+
     private void dashed(double width, double head, int colour) {
         pen.stroke(colour, width * weight);
         pen.dash(dashes);
@@ -144,6 +158,13 @@ public final class ArrowPainter {
     }
 
     private void head(double wanted, double half, int colour, int ground, boolean hollow) {
+        corners(wanted, half);
+        pen.fill(hollow ? ground : colour);
+        pen.stroke(colour, (hollow ? 1.8 : 0.8) * weight);
+        pen.polygon(x, y, 3, true, hollow);
+    }
+
+    private void corners(double wanted, double half) {
         double h = headLength(wanted);
         double w = half * weight * h / (wanted * weight);
         double baseX = tailX + (length - h) * ux;
@@ -151,9 +172,6 @@ public final class ArrowPainter {
         set(0, tailX + length * ux, tailY + length * uy);
         set(1, baseX - w * uy, baseY + w * ux);
         set(2, baseX + w * uy, baseY - w * ux);
-        pen.fill(hollow ? ground : colour);
-        pen.stroke(colour, (hollow ? 1.8 : 0.8) * weight);
-        pen.polygon(x, y, 3, true, hollow);
     }
 
     private void set(int i, double atX, double atY) {
