@@ -26,8 +26,8 @@ final class CheckCommand implements Command {
         return """
                 Judges a machine against its limits. The exit code is 0 when every judged finding is met, else 1.
 
-                  --duty NAME         the duty point, or a load step at a corner of the ranges by its whole
-                                      name; all of them if left out
+                  --duty NAME         the duty point, or a load step at a corner of the ranges by its whole name;
+                                      all of them if left out
                   --format text|json  for people or for programs; text if left out
                 """;
     }
