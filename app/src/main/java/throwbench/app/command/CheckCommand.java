@@ -24,10 +24,10 @@ final class CheckCommand implements Command {
     @Override
     public String help() {
         return """
-                Judges a machine against its limits, at its duty points and at every load step at every corner of its
-                ranges. The exit code is 0 when every judged finding is met, else 1.
+                Judges a machine against its limits. The exit code is 0 when every judged finding is met, else 1.
 
-                  --duty NAME         the duty point, or a load step at a corner by its whole name; all if left out
+                  --duty NAME         the duty point, or a load step at a corner of the ranges by its whole name;
+                                      all of them if left out
                   --format text|json  for people or for programs; text if left out
                 """;
     }

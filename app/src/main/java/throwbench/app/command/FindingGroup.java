@@ -11,7 +11,8 @@ import throwbench.solver.finding.Finding;
 import throwbench.solver.finding.Verdict;
 
 /**
- * The findings of one criterion for one throw, stage, chamber or machine, one a duty point, the worst first.
+ * The findings of one criterion for one throw, stage, chamber or machine, one a duty point, the worst first; for several throws
+ * or chambers together where the same input is missing for all of them.
  *
  * @param findings at least one
  */
@@ -32,7 +33,21 @@ record FindingGroup(List<Finding> findings) {
             Subject subject = new Subject(finding.criterion().id(), subject(finding.where()));
             groups.computeIfAbsent(subject, s -> new ArrayList<>()).add(finding);
         }
-        return toGroups(groups.values());
+        return toGroups(gathered(groups.values()));
+    }
+
+    /** Lists of one criterion that lack their value for one reason throughout become one list. */
+    private static Collection<List<Finding>> gathered(Collection<List<Finding>> lists) {
+        record Lack(String id, String note) {}
+        Map<Object, List<Finding>> gathered = new LinkedHashMap<>();
+        for (List<Finding> list : lists) {
+            Finding first = list.get(0);
+            boolean lacking =
+                    list.stream().allMatch(f -> f.value().isEmpty() && f.note().equals(first.note()));
+            Object key = lacking ? new Lack(first.criterion().id(), first.note()) : list;
+            gathered.computeIfAbsent(key, k -> new ArrayList<>()).addAll(list);
+        }
+        return gathered.values();
     }
 
     private static List<FindingGroup> toGroups(Collection<List<Finding>> lists) {
@@ -46,6 +61,17 @@ record FindingGroup(List<Finding> findings) {
                 .or(() -> where.throwName().map(name -> "throw " + name))
                 .or(() -> where.stage().map(name -> "stage " + name))
                 .orElse("machine");
+    }
+
+    /** What the findings are about, several of a kind in one: "throw A, B". */
+    String subject() {
+        List<String> subjects =
+                findings.stream().map(f -> subject(f.where())).distinct().toList();
+        StringBuilder text = new StringBuilder(subjects.get(0));
+        for (String more : subjects.subList(1, subjects.size())) {
+            text.append(", ").append(more.substring(more.indexOf(' ') + 1));
+        }
+        return text.toString();
     }
 
     Criterion criterion() {
@@ -75,7 +101,7 @@ record FindingGroup(List<Finding> findings) {
         Finding shown = shown();
         List<String> parts = new ArrayList<>();
         List<String> place = new ArrayList<>();
-        if (severalDuties) {
+        if (severalDuties && shown.value().isPresent()) {
             String rank = findings.size() == 1 ? "at" : shown.margin().isPresent() ? "worst at" : "greatest at";
             place.add(rank + " \"" + shown.where().duty() + "\"");
         }

@@ -50,7 +50,7 @@ final class FindingsText implements Written {
         lines.add("");
         List<Row> rows = new ArrayList<>();
         for (FindingGroup group : groups) {
-            rows.add(Row.of(group.shown()));
+            rows.add(Row.of(group));
         }
         int[] widths = widths(rows);
         for (int i = 0; i < rows.size(); i++) {
@@ -72,7 +72,7 @@ final class FindingsText implements Written {
 
     private void addDetails(FindingGroup group, int[] widths, List<String> lines) {
         int indent = VERDICT_WIDTH + GAP;
-        String subject = FindingGroup.subject(group.shown().where());
+        String subject = group.subject();
         String whole = TextColumns.width(subject) > widths[SUBJECT] ? subject + "; " : "";
         String details = whole + group.details(duties.size() > 1);
         for (String text : List.of(details, group.spread())) {
@@ -122,7 +122,8 @@ final class FindingsText implements Written {
         static final int COLUMNS = 7;
         private static final int VALUE = 3;
 
-        static Row of(Finding finding) {
+        static Row of(FindingGroup group) {
+            Finding finding = group.shown();
             Criterion criterion = finding.criterion();
             double limit = finding.limit().orElse(0);
             double size = Math.max(Math.abs(limit), Math.abs(finding.value().orElse(0)));
@@ -133,7 +134,7 @@ final class FindingsText implements Written {
                         case NOT_JUDGED -> "not judged";
                     },
                     criterion.title(),
-                    TextColumns.cut(FindingGroup.subject(finding.where()), Integer.MAX_VALUE),
+                    TextColumns.cut(group.subject(), Integer.MAX_VALUE),
                     cell(finding.value(), criterion, size),
                     finding.limit().isEmpty() ? "" : criterion.limitIsGreatest() ? "at most" : "at least",
                     finding.limit().isEmpty() ? "" : cell(finding.limit(), criterion, size),

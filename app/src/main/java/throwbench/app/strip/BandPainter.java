@@ -47,10 +47,8 @@ final class BandPainter {
         if (said) {
             return;
         }
-        double left = index > 0 ? from - layout.x(plot.band().get(index - 1).from()) : 0;
-        double right = index + 1 < plot.band().size()
-                ? layout.x(plot.band().get(index + 1).to()) - to
-                : 0;
+        double left = index > 0 ? free(pen, plot, index - 1) : 0;
+        double right = index + 1 < plot.band().size() ? free(pen, plot, index + 1) : 0;
         double size = Math.min(13, band.height() * 0.48);
         pen.font(size, true);
         String words = span.words().get(span.words().size() - 1) + " (" + span.asked() + ")";
@@ -70,6 +68,17 @@ final class BandPainter {
         arrowHead(pen, tip, band.middle(), after ? size * 0.6 : -size * 0.6);
         double base = band.middle() + size * 0.36;
         pen.text(words, after ? tip + size : tip - size, base, after ? Pen.Align.LEFT : Pen.Align.RIGHT);
+    }
+
+    /** What a span's own words leave free on either side of them. */
+    private static double free(Pen pen, StripPlot plot, int index) {
+        BandSpan span = plot.band().get(index);
+        double width = plot.layout().x(span.to()) - plot.layout().x(span.from());
+        return (width
+                                - caption(pen, span, plot.layout().band().height(), width - 10)
+                                        .width())
+                        / 2
+                - 6;
     }
 
     private void arrowHead(Pen pen, double tip, double y, double length) {

@@ -13,6 +13,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
+import throwbench.solver.finding.BearingPressure;
 import throwbench.solver.finding.Criterion;
 import throwbench.solver.finding.Finding;
 import throwbench.solver.finding.JudgedDuty;
@@ -180,6 +181,29 @@ class FindingsTextTest {
         assertTrue(text.contains("""
                 not judged  temperature  chamber A head  -  at most  150 degC
                             needs a suctionTemperature
+                """), text);
+    }
+
+    @Test
+    void throwsThatLackTheSameInputShareARowAndOthersDoNot() throws IOException {
+        List<Finding> findings = new ArrayList<>();
+        for (String name : List.of("A", "B", "C")) {
+            for (String duty : List.of("d 0", "d 1")) {
+                String reason = name.equals("C") ? "crossheadPart.pinDiameter is missing" : "both are missing";
+                findings.add(Finding.unknown(
+                        BearingPressure.CROSSHEAD_PIN,
+                        Finding.Place.ofThrow(duty, name),
+                        OptionalDouble.of(7e6),
+                        reason));
+            }
+        }
+        String text = text("m", duties(2, "d"), findings);
+        assertTrue(text.contains("""
+                not judged  crosshead pin pressure  throw A, B  -  at most  7 MPa
+                            both are missing
+                not judged  crosshead pin pressure  throw C     -  at most  7 MPa
+                            crossheadPart.pinDiameter is missing
+
                 """), text);
     }
 

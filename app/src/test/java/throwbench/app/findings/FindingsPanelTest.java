@@ -120,7 +120,12 @@ class FindingsPanelTest {
                 .iterator()
                 .next());
         robot.type(KeyCode.RIGHT);
-        assertEquals(heads + 1, list.getItems().size());
+        String first = shown.findings().get(0).criterion().id();
+        long others = shown.findings().stream()
+                        .filter(f -> f.criterion().id().equals(first))
+                        .count()
+                - 1;
+        assertEquals(heads + others, list.getItems().size());
         robot.type(KeyCode.LEFT);
         assertEquals(heads, list.getItems().size());
     }

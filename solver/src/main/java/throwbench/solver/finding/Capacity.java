@@ -29,7 +29,7 @@ public final class Capacity implements StageCriterion {
         OptionalDouble mass = flow.capacity().getOrDefault(stage, OptionalDouble.empty());
         OptionalDouble volume = flow.inletVolume().getOrDefault(stage, OptionalDouble.empty());
         String atInlet = volume.isPresent()
-                ? String.format(Locale.ROOT, "%.6g m3/s at inlet conditions", volume.getAsDouble())
+                ? String.format(Locale.ROOT, "%.4g m3/s at inlet conditions", volume.getAsDouble())
                 : "";
         if (mass.isPresent()) {
             return Optional.of(Found.of(mass.getAsDouble()).noting(atInlet));

@@ -42,17 +42,21 @@ public record JudgedPoints(List<DutyPoint> points, List<Refusal> refusals) {
         if (count > MOST) {
             String sentence = String.format(
                     Locale.ROOT,
-                    "%d load steps at their corners make %.0f duty points, at most %d are judged",
-                    steps.size(),
+                    "load steps and corners make %.0f duty points (%d × %.0f), at most %d are judged",
                     count,
+                    steps.size(),
+                    corners.count(),
                     MOST);
             return new JudgedPoints(points, List.of(new Refusal("ranges", sentence)));
         }
+        List<Corners.Corner> all = corners.all();
         for (LoadStep step : steps) {
-            for (Corners.Corner corner : corners.all()) {
-                String where = corner.label().isEmpty() ? base.name() : corner.label();
-                points.add(new DutyPoint(
-                        step.name() + Corners.APART + where, corner.speed(), corner.stages(), step.chambers()));
+            for (Corners.Corner corner : all) {
+                boolean asWritten = corner.label().isEmpty();
+                if (!asWritten || !machine.loadSteps().isEmpty()) {
+                    String name = step.name() + Corners.APART + (asWritten ? base.name() : corner.label());
+                    points.add(new DutyPoint(name, corner.speed(), corner.stages(), step.chambers()));
+                }
             }
         }
         return new JudgedPoints(points, corners.refusals());

@@ -40,13 +40,17 @@ public final class PistonRodBuckling implements ThrowCriterion {
         if (!(least.value() < 0)) {
             return Found.none("the piston rod is never in compression");
         }
-        double diameter = part.diameter().orElseThrow();
-        Strut strut = new Strut(
-                PistonRod.area(diameter),
-                part.freeLength().orElseThrow() / (diameter / 4),
+        Strut strut = roundRod(
+                part.diameter().orElseThrow(),
+                part.freeLength().orElseThrow(),
                 part.elasticModulus().orElseThrow(),
                 part.yieldStrength().orElseThrow());
         return Found.at(least, strut.criticalLoad() / -least.value()).noting(strut.note());
+    }
+
+    /** A round bar of diameter and length in m with pinned ends; its radius of gyration is a quarter of the diameter. */
+    static Strut roundRod(double diameter, double length, double elasticModulus, double yieldStrength) {
+        return new Strut(PistonRod.area(diameter), length / (diameter / 4), elasticModulus, yieldStrength);
     }
 
     /**

@@ -56,14 +56,15 @@ public final class Shaking implements MachineCriterion {
                 : Found.of(size).noting(direction(vector, duty.running().rotation()));
     }
 
-    private static String direction(OrderVector vector, Rotation rotation) {
+    private String direction(OrderVector vector, Rotation rotation) {
         OptionalDouble direction = vector.direction();
         if (direction.isPresent()) {
-            return String.format(
-                    Locale.ROOT,
-                    "greatest along %.1f deg from X, %.4g across it",
-                    Math.toDegrees(direction.getAsDouble()),
-                    vector.leastSize());
+            // tenths of a degree, and 180 is 0
+            double tenths = Math.rint(Math.toDegrees(direction.getAsDouble()) * 10) % 1800;
+            String along = String.format(Locale.ROOT, "greatest along %.1f deg from X, ", tenths / 10);
+            return vector.leastSize() <= ROUNDING * vector.size()
+                    ? along + "none across it"
+                    : along + String.format(Locale.ROOT, "%.4g k%s across it", vector.leastSize() / 1e3, unit());
         }
         boolean with = vector.length(rotation) >= vector.size() / 2;
         return "equally great all round, turning " + (with ? "with" : "against") + " the shaft";

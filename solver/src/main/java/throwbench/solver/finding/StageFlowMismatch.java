@@ -35,7 +35,7 @@ public final class StageFlowMismatch implements StageCriterion {
             return Found.of(mismatch.relative().getAsDouble())
                     .noting(String.format(
                             Locale.ROOT,
-                            "stage %s passes %.6g kg/s, stage %s takes in %.6g kg/s",
+                            "stage %s passes %.4g kg/s, stage %s takes in %.4g kg/s",
                             mismatch.stage(),
                             mismatch.passed().orElseThrow(),
                             String.join(" and stage ", mismatch.followers()),

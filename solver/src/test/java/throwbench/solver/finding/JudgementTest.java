@@ -4,14 +4,19 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
+import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import throwbench.solver.machine.LimitKey;
 import throwbench.solver.machine.Limits;
@@ -26,6 +31,8 @@ import throwbench.solver.trial.Machines;
 
 /** Findings against the quantities that they judge. */
 class JudgementTest {
+
+    private static final Set<String> UNITS = Set.of("N", "N m", "deg", "1", "K", "m/s", "Pa", "m", "kg/s", "W");
 
     private static Machine booster(Limits machineLimits, Limits throwLimits) {
         Throw t = Machines.boosterThrow(0);
@@ -182,7 +189,46 @@ class JudgementTest {
             assertFalse(criterion.title().isBlank(), criterion.id());
             assertFalse(criterion.formula().isBlank(), criterion.id());
             assertFalse(criterion.source().isBlank(), criterion.id());
-            assertFalse(criterion.unit().isBlank(), criterion.id());
+            assertTrue(UNITS.contains(criterion.unit()), criterion.id() + " in " + criterion.unit());
+        }
+    }
+
+    @Test
+    void everyLimitOfTheMachineFileLimitsOneCriterionInTheSameOrder() {
+        assertEquals(
+                List.of(LimitKey.values()),
+                Judgement.CRITERIA.stream().map(Criterion::limitKey).toList());
+        for (Criterion criterion : Judgement.CRITERIA) {
+            boolean ofALoad = criterion instanceof PeakLoad;
+            String key =
+                    criterion.limitKey().text().replaceAll("([A-Z])", "-$1").toLowerCase(Locale.ROOT);
+            assertEquals(ofALoad ? key.replace("-", "-load-") : key, criterion.id());
+        }
+    }
+
+    /** Completeness: the id of each criterion stands in a test of the findings. */
+    @Test
+    void everyCriterionHasATest() throws IOException {
+        Path here = Path.of(Optional.ofNullable(System.getProperty("basedir")).orElse(""))
+                .resolve("src/test/java/throwbench/solver/finding");
+        StringBuilder tests = new StringBuilder();
+        try (Stream<Path> files = Files.list(here)) {
+            for (Path file : files.sorted().toList()) {
+                tests.append(Files.readString(file));
+            }
+        }
+        for (Criterion criterion : Judgement.CRITERIA) {
+            assertTrue(tests.indexOf('"' + criterion.id()) >= 0, criterion.id() + " is in no test");
+        }
+    }
+
+    @Test
+    void whatIsReportedWithoutALimitIsNotJudged() {
+        for (String id : List.of("capacity", "indicated-power", "shaft-power", "shaking-force-primary")) {
+            Finding finding = only(judge(booster(Limits.NONE, Limits.NONE)), id);
+            assertEquals(Verdict.NOT_JUDGED, finding.verdict());
+            assertTrue(finding.value().isPresent(), id);
+            assertTrue(finding.note().endsWith("no limit given"), finding.note());
         }
     }
 }
