@@ -26,8 +26,8 @@ final class CheckCommand implements Command {
         return """
                 Judges a machine against its limits. The exit code is 0 when every judged finding is met, else 1.
 
-                  --duty NAME         the duty point, or a load step at a corner of the ranges by its whole name; all
-                                      of them if left out
+                  --duty NAME         the duty point, or a load step at a corner of the ranges by its whole name;
+                                      all of them if left out
                   --format text|json  for people or for programs; text if left out
                 """;
     }
@@ -54,8 +54,7 @@ final class CheckCommand implements Command {
         }
         JudgedPoints points = source.get().points();
         if (name.isEmpty() && !points.refusals().isEmpty()) {
-            source.get().refuse(points.refusals());
-            return ExitCode.REFUSED;
+            return source.get().refuse(points.refusals());
         }
         List<DutyPoint> duties = name.isPresent() ? List.of(duty.get()) : points.points();
         return judge(source.get(), duties, format.get(), terminal);
@@ -65,8 +64,7 @@ final class CheckCommand implements Command {
     static ExitCode judge(MachineSource source, List<DutyPoint> duties, String format, Terminal terminal) {
         Judgement judgement = Judgement.of(source.machine(), duties);
         if (!judgement.refusals().isEmpty()) {
-            source.refuse(judgement.refusals());
-            return ExitCode.REFUSED;
+            return source.refuse(judgement.refusals());
         }
         String machine = source.machine().name();
         Written result = format.equals("json")

@@ -124,10 +124,11 @@ final class MachineSource {
                 file, path, "no " + kind + " \"" + name + "\", the file has " + NearWords.existing(name, existing));
     }
 
-    /** Says why the machine cannot be solved. */
-    void refuse(List<Refusal> refusals) {
+    /** Says why the machine cannot be solved; the exit code tells a wrong machine from a solver that did not get there. */
+    ExitCode refuse(List<Refusal> refusals) {
         for (Refusal refusal : refusals) {
             terminal.complain(file, refusal.path(), refusal.sentence());
         }
+        return refusals.stream().anyMatch(Refusal::failed) ? ExitCode.FAILED : ExitCode.REFUSED;
     }
 }

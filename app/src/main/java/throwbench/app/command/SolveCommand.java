@@ -68,8 +68,7 @@ final class SolveCommand implements Command {
         }
         Settling settling = RunningMachine.settle(source.get().machine(), duty.get());
         if (settling.running().isEmpty()) {
-            source.get().refuse(settling.refusals());
-            return ExitCode.REFUSED;
+            return source.get().refuse(settling.refusals());
         }
         Revolution revolution = Revolution.solve(settling.running().get(), shown.get(), (int) stations.getAsLong());
         Written result = format.get().equals("csv")

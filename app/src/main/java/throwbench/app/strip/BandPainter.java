@@ -1,5 +1,7 @@
 package throwbench.app.strip;
 
+import java.util.List;
+import java.util.Optional;
 import throwbench.app.drawing.Palette;
 import throwbench.app.drawing.Pen;
 
@@ -12,11 +14,15 @@ final class BandPainter {
     private static final double CHEVRON_STEP = 46;
     private static final double SHADE = 0.07;
 
+    /** What a neighbour keeps for its own words beside a call-out. */
+    private static final double LEAST_BESIDE = 70;
+
     private final double[] px = new double[3];
     private final double[] py = new double[3];
 
     void paint(Pen pen, StripPlot plot, Palette palette) {
         StripLayout layout = plot.layout();
+        Optional<CallOut> callOut = callOut(pen, plot);
         for (BandSpan span : plot.band()) {
             double from = layout.x(span.from());
             double to = layout.x(span.to());
@@ -27,58 +33,57 @@ final class BandPainter {
             pen.rect(from, layout.plotTop(), to - from, layout.plotBottom() - layout.plotTop(), 0, true, false);
             pen.fill(colour);
             pen.rect(from, layout.band().top(), to - from, layout.band().height(), 0, true, false);
-            words(pen, layout.band(), span, from, to, palette);
+            Optional<CallOut> taken = callOut.filter(c -> c.neighbour().equals(span));
+            double start = taken.filter(CallOut::after).map(CallOut::end).orElse(from);
+            double end = taken.filter(c -> !c.after()).map(CallOut::start).orElse(to);
+            words(pen, layout.band(), span, start, end, palette);
         }
-        for (int i = 0; i < plot.band().size(); i++) {
-            callOut(pen, plot, i, palette);
-        }
+        callOut.ifPresent(c -> paint(pen, plot, c, palette));
         edges(pen, plot, palette);
     }
 
+    /** Words of a narrow span that stand in the neighbouring one, from start to end. */
+    private record CallOut(BandSpan neighbour, boolean after, double start, double end, double size, String words) {}
+
     /** The span that counts always carries its degrees and what is asked: beside it where it is too narrow itself. */
-    private void callOut(Pen pen, StripPlot plot, int index, Palette palette) {
-        BandSpan span = plot.band().get(index);
+    private static Optional<CallOut> callOut(Pen pen, StripPlot plot) {
         StripLayout layout = plot.layout();
-        double from = layout.x(span.from());
-        double to = layout.x(span.to());
-        StripLayout.Row band = layout.band();
-        boolean said = span.asked().isEmpty()
-                || caption(pen, span, band.height(), to - from - 10).saysAll();
-        if (said) {
-            return;
+        List<BandSpan> band = plot.band();
+        double height = layout.band().height();
+        for (int i = 0; i < band.size(); i++) {
+            BandSpan span = band.get(i);
+            double from = layout.x(span.from());
+            double to = layout.x(span.to());
+            if (span.asked().isEmpty()
+                    || caption(pen, span, height, to - from - 10).saysAll()) {
+                continue;
+            }
+            double left = i > 0 ? from - layout.x(band.get(i - 1).from()) : 0;
+            double right = i + 1 < band.size() ? layout.x(band.get(i + 1).to()) - to : 0;
+            boolean after = right >= left;
+            double size = Math.min(13, height * 0.48);
+            pen.font(size, true);
+            String words = span.words().get(span.words().size() - 1) + " (" + span.asked() + ")";
+            double width = pen.width(words) + 2.4 * size;
+            if (width + LEAST_BESIDE <= Math.max(left, right)) {
+                double start = after ? to : from - width;
+                return Optional.of(
+                        new CallOut(band.get(after ? i + 1 : i - 1), after, start, start + width, size, words));
+            }
         }
-        double left = index > 0 ? free(pen, plot, index - 1) : 0;
-        double right = index + 1 < plot.band().size() ? free(pen, plot, index + 1) : 0;
-        double size = Math.min(13, band.height() * 0.48);
-        pen.font(size, true);
-        String words = span.words().get(span.words().size() - 1) + " (" + span.asked() + ")";
-        double width = pen.width(words) + 2.4 * size;
-        if (width > Math.max(left, right)) {
-            return;
-        }
-        boolean after = right >= left;
-        int ground = span.inTension()
-                ? palette.loads().compression()
-                : palette.loads().tension();
-        double start = after ? to : from - width;
-        pen.fill(ground);
-        pen.rect(start, band.top(), width, band.height(), 0, true, false);
-        pen.fill(palette.ground().onAccent());
-        double tip = after ? to + 0.5 * size : from - 0.5 * size;
-        arrowHead(pen, tip, band.middle(), after ? size * 0.6 : -size * 0.6);
-        double base = band.middle() + size * 0.36;
-        pen.text(words, after ? tip + size : tip - size, base, after ? Pen.Align.LEFT : Pen.Align.RIGHT);
+        return Optional.empty();
     }
 
-    /** What a span's own words leave free on either side of them. */
-    private static double free(Pen pen, StripPlot plot, int index) {
-        BandSpan span = plot.band().get(index);
-        double width = plot.layout().x(span.to()) - plot.layout().x(span.from());
-        return (width
-                                - caption(pen, span, plot.layout().band().height(), width - 10)
-                                        .width())
-                        / 2
-                - 6;
+    private void paint(Pen pen, StripPlot plot, CallOut callOut, Palette palette) {
+        StripLayout.Row band = plot.layout().band();
+        double size = callOut.size();
+        boolean after = callOut.after();
+        double tip = after ? callOut.start() + 0.5 * size : callOut.end() - 0.5 * size;
+        pen.fill(palette.ground().onAccent());
+        arrowHead(pen, tip, band.middle(), after ? size * 0.6 : -size * 0.6);
+        pen.font(size, true);
+        double base = band.middle() + size * 0.36;
+        pen.text(callOut.words(), after ? tip + size : tip - size, base, after ? Pen.Align.LEFT : Pen.Align.RIGHT);
     }
 
     private void arrowHead(Pen pen, double tip, double y, double length) {

@@ -6,7 +6,7 @@ import java.lang.management.ThreadMXBean;
 import javafx.animation.AnimationTimer;
 
 /**
- * Measures frames for whoever asks with {@code -Dthrowbench.frames=600}: prints how many came a second, how long the window's
+ * Measures frames for whoever asks with {@code -Dthrowbench.frames=600}: prints when the first came, how many came a second, how long the window's
  * thread worked on one, and the processor time of both drawing threads; then closes the window.
  */
 final class FrameReport extends AnimationTimer {
@@ -18,6 +18,7 @@ final class FrameReport extends AnimationTimer {
     private final Runnable done;
     private final ThreadMXBean threads = ManagementFactory.getThreadMXBean();
     private int count;
+    private long firstFrame;
     private long startWindow;
     private long startRender;
 
@@ -37,6 +38,9 @@ final class FrameReport extends AnimationTimer {
     @Override
     public void handle(long now) {
         count++;
+        if (count == 1) {
+            firstFrame = ManagementFactory.getRuntimeMXBean().getUptime();
+        }
         if (count == WARM_UP) {
             startWindow = cpu("JavaFX Application Thread");
             startRender = cpu("QuantumRenderer-0");
@@ -46,9 +50,9 @@ final class FrameReport extends AnimationTimer {
             double window = (cpu("JavaFX Application Thread") - startWindow) / 1e6 / frames;
             double render = (cpu("QuantumRenderer-0") - startRender) / 1e6 / frames;
             System.out.printf(
-                    "frames/s %.1f, our work a frame: median %.2f ms, 99th percentile %.2f ms; processor time a frame:"
+                    "first frame after %d ms; frames/s %.1f, our work a frame: median %.2f ms, 99th percentile %.2f ms; processor time a frame:"
                             + " window thread %.2f ms, render thread %.2f ms%n",
-                    times.perSecond(), times.workMillis(0.5), times.workMillis(0.99), window, render);
+                    firstFrame, times.perSecond(), times.workMillis(0.5), times.workMillis(0.99), window, render);
             done.run();
         }
     }

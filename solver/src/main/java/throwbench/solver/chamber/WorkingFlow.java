@@ -7,6 +7,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import throwbench.solver.chamber.flow.FlowFunction;
 import throwbench.solver.chamber.flow.PistonPath;
+import throwbench.solver.chamber.flow.StepRule;
 import throwbench.solver.chamber.flow.ValveOpening;
 import throwbench.solver.mechanism.Angles;
 
@@ -16,16 +17,12 @@ import throwbench.solver.mechanism.Angles;
  */
 final class WorkingFlow {
 
-    private static final double SOLVE_STEP = Math.toRadians(1);
+    private static final StepRule SOLVE_SUCTION = new StepRule(Math.toRadians(1.85), 2e-5, 0.03, 1.3, 3e-4);
 
     /** The volume is small there and changes by a greater share with every degree. */
-    private static final double SOLVE_DISCHARGE_STEP = Math.toRadians(0.5);
+    private static final StepRule SOLVE_DISCHARGE = new StepRule(Math.toRadians(0.75), 2e-5, 0.05, 1.3, 3e-4);
 
-    private static final double SOLVE_GROWTH = 1.25;
-
-    private static final double MAP_STEP = Math.toRadians(4);
-
-    private static final double MAP_GROWTH = 1.5;
+    private static final StepRule MAP = new StepRule(Math.toRadians(4), 1e-4, 0.2, 1.8, 1e-2);
 
     private final ChamberDuty duty;
     private final ValveOpening suction;
@@ -56,9 +53,8 @@ final class WorkingFlow {
         PistonPath path = duty.pistonPath();
         FlowFunction law = new FlowFunction(k);
         boolean map = duty.accuracy() == CycleAccuracy.MAP;
-        double growth = map ? MAP_GROWTH : SOLVE_GROWTH;
-        suction = new ValveOpening(path, law, true, map ? MAP_STEP : SOLVE_STEP, growth);
-        discharge = new ValveOpening(path, law, false, map ? MAP_STEP : SOLVE_DISCHARGE_STEP, growth);
+        suction = new ValveOpening(path, law, true, map ? MAP : SOLVE_SUCTION);
+        discharge = new ValveOpening(path, law, false, map ? MAP : SOLVE_DISCHARGE);
         LineConditions lines = duty.lines();
         volumeRatio = Math.pow(lines.dischargePressure() / lines.suctionPressure(), 1 / k);
         scalePerRootKelvin = Math.sqrt(gasConstant) / duty.meanSpeed();

@@ -76,7 +76,8 @@ public record Judgement(List<Finding> findings, List<Refusal> refusals) {
         Settling settling = RunningMachine.settle(machine, duty);
         boolean written = machine.dutyPoints().contains(duty);
         List<Refusal> refusals = settling.refusals().stream()
-                .map(r -> written ? r : new Refusal(r.path(), r.sentence() + " (at \"" + duty.name() + "\")"))
+                .map(r ->
+                        written ? r : new Refusal(r.path(), r.sentence() + " (at \"" + duty.name() + "\")", r.failed()))
                 .toList();
         return new Judgement(settling.running().map(Judgement::at).orElse(List.of()), refusals);
     }

@@ -71,7 +71,7 @@ final class ThrowSettler {
         String path = "throws[" + index + "].chambers[" + chamberIndex + "].cycle";
         Optional<CycleOutcome> alone = chamber.cycle().solveAlone(duty.condition(chamber.name()));
         if (alone.isPresent()) {
-            return taken(path, alone.get());
+            return taken(path, chamber, alone.get());
         }
         if (chamber.stage().isEmpty()) {
             return refuse(path, "a " + chamber.cycle().kind() + " cycle needs a stage");
@@ -87,10 +87,14 @@ final class ThrowSettler {
                 lines.suctionPressure().getAsDouble(),
                 lines.dischargePressure().getAsDouble(),
                 lines.suctionTemperature());
-        return taken(path, cycle(machine, duty, described, chamber, known));
+        return taken(path, chamber, cycle(machine, duty, described, chamber, known));
     }
 
-    private Optional<PressureCurve> taken(String path, CycleOutcome outcome) {
+    private Optional<PressureCurve> taken(String path, Chamber chamber, CycleOutcome outcome) {
+        if (outcome.failed()) {
+            refusals.add(new Refusal(path, "chamber \"" + chamber.name() + "\": " + outcome.refusal(), true));
+            return Optional.empty();
+        }
         return outcome.curve().isPresent() ? outcome.curve() : refuse(path, outcome.refusal());
     }
 

@@ -42,12 +42,13 @@ class ValveFlowLimitTest {
                 ideal.dischargeTemperature().orElseThrow(),
                 flow.dischargeTemperature().orElseThrow(),
                 1e-3);
-        for (int i = 0; i < 4; i++) {
-            ValveEvent one = ideal.events().get(i);
-            ValveEvent other = flow.events().get(i);
-            assertEquals(one.valve(), other.valve());
-            assertEquals(one.opens(), other.opens());
-            assertEquals(one.crankAngle(), other.crankAngle(), 1e-4);
+        for (ValveEvent event : ideal.events()) {
+            ValveEvent same = flow.events().stream()
+                    .filter(other -> other.valve() == event.valve() && other.opens() == event.opens())
+                    .findFirst()
+                    .orElseThrow();
+            double apart = Math.IEEEremainder(same.crankAngle() - event.crankAngle(), 2 * Math.PI);
+            assertEquals(0, apart, 1e-5, event.toString());
         }
         ValveLossWork loss = flow.valveLossWork().orElseThrow();
         assertEquals(0, loss.suction() + loss.discharge(), 1e-2);

@@ -98,7 +98,7 @@ class ValveFlowPropertyTest {
     @Property(tries = 200)
     void leakingChambersAlwaysSettle(@ForAll("leaking") Any any) {
         LeakyFlow flow = new LeakyFlow(any.valves(), any.duty(), any.gasConstant(), any.k(), TEMPERATURE);
-        assertTrue(flow.search(1e-8, 100), "turns " + flow.turns());
+        assertTrue(flow.search(1e-8, 400), "turns " + flow.turns());
         PressureCurve curve = flow.curve(List.of());
         sound(any, curve);
         double drawn = curve.massPerTurn().orElseThrow() * any.gasConstant();

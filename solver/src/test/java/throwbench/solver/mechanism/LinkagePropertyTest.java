@@ -67,7 +67,8 @@ class LinkagePropertyTest {
             @ForAll(supplier = AnyLinkage.class) Linkage linkage,
             @ForAll Rotation rotation,
             @ForAll @IntRange(max = 1000) int share) {
-        double travel = linkage.stroke() * share / 1000;
+        // rounding must not take it out of the stroke
+        double travel = Math.min(linkage.stroke(), linkage.stroke() * share / 1000);
         Linkage.TravelAngles angles = linkage.anglesAtTravel(travel, rotation);
         double crankEnd = linkage.crankEndDeadCentre(rotation);
         double rounding = 1e-13 * linkage.rodLength() / linkage.crankRadius() * linkage.rodLength();

@@ -8,6 +8,9 @@ import java.util.Optional;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import net.jqwik.api.constraints.IntRange;
+import org.apache.commons.math3.complex.Complex;
+import org.apache.commons.math3.complex.ComplexUtils;
+import throwbench.solver.load.Friction;
 import throwbench.solver.load.ThrowBody;
 import throwbench.solver.machine.DutyPoint;
 import throwbench.solver.machine.Machine;
@@ -171,6 +174,57 @@ class RevolutionPropertyTest {
             assertEquals(
                     own.at(column, i), sense * seen.at(column, i), 1e-12 * scale(own, 0, column), column + " at " + i);
         }
+    }
+
+    /**
+     * What the moving parts do to the frame is what the frame and the gas do to them, turned round: bearings, guides and gas
+     * add up to −(shaking force), in machine axes; its moments about the middle are the couples.
+     */
+    @Property(tries = 150)
+    void shakingIsMinusAllForcesOnTheMovingParts(
+            @ForAll(supplier = AnyMachine.class) Machine any, @ForAll @IntRange(max = 719) int station) {
+        List<Throw> smooth = any.throwsInOrder().stream()
+                .map(t -> Machines.changed(t, t.name(), t.place(), t.linkage(), Friction.NONE, t.chambers()))
+                .toList();
+        Site weightless = new Site(any.site().ambientPressure(), any.site().framePressure(), false);
+        Machine machine = Machines.changed(
+                any,
+                smooth,
+                any.drive().rotation(),
+                weightless,
+                any.dutyPoints().get(0));
+        RunningMachine running = Machines.running(machine);
+        Instant instant = new Instant(running, 0).turnTo(Angles.TURN / 720 * station);
+        double[] sums = new double[4];
+        double size = 0;
+        double least = smooth.stream()
+                .mapToDouble(t -> t.place().shaftPosition())
+                .min()
+                .orElseThrow();
+        double greatest = smooth.stream()
+                .mapToDouble(t -> t.place().shaftPosition())
+                .max()
+                .orElseThrow();
+        for (int k = 0; k < smooth.size(); k++) {
+            double along = instant.at(k, Column.MAIN_BEARING_X) + instant.at(k, Column.GAS_LOAD);
+            double across = instant.at(k, Column.MAIN_BEARING_Y) + instant.at(k, Column.GUIDE_FORCE);
+            ShaftPlace place = smooth.get(k).place();
+            // counter-clockwise by the axis direction, written as a product of complex numbers
+            Complex force = new Complex(along, across).multiply(ComplexUtils.polar2Complex(1, place.axisDirection()));
+            double arm = place.shaftPosition() - (least + greatest) / 2;
+            sums[0] -= force.getReal();
+            sums[1] -= force.getImaginary();
+            sums[2] -= arm * force.getReal();
+            sums[3] -= arm * force.getImaginary();
+            size += Math.abs(instant.at(k, Column.GAS_LOAD))
+                    + Math.abs(across)
+                    + Math.abs(instant.at(k, Column.MAIN_BEARING_X));
+        }
+        double rounding = 1e-11 * size;
+        assertEquals(sums[0], instant.at(Column.SHAKING_FORCE_X), rounding);
+        assertEquals(sums[1], instant.at(Column.SHAKING_FORCE_Y), rounding);
+        assertEquals(sums[2], instant.at(Column.SHAKING_COUPLE_X), 2 * rounding);
+        assertEquals(sums[3], instant.at(Column.SHAKING_COUPLE_Y), 2 * rounding);
     }
 
     /** Pressure on a closed surface makes no force: one pressure everywhere, on both sides and in the frame. */

@@ -8,11 +8,6 @@ final class FlowFit {
 
     private static final int TERMS = 10;
 
-    private static final int MOST = 30;
-
-    /** Newton's error is about the square of its last step: 1e-12. */
-    private static final double NEAR = 1e-6;
-
     /** Values at the Chebyshev points of [0, 1] → coefficients of the polynomial through them. */
     private static final double[][] THROUGH_POINTS = throughPoints();
 
@@ -97,34 +92,6 @@ final class FlowFit {
         double low = Math.fma(Math.fma(c[3], w, c[2]), w2, Math.fma(c[1], w, c[0]));
         double high = Math.fma(Math.fma(c[7], w, c[6]), w2, Math.fma(c[5], w, c[4]));
         return Math.fma(Math.fma(Math.fma(c[9], w, c[8]), w4, high), w4, low);
-    }
-
-    /**
-     * The u at which b u² + c ψ(u) = free, by Newton's method with the quadratic kept: ψ alone is put straight.
-     *
-     * @param b above 0
-     * @param c above 0
-     * @param free above 0
-     * @param guess ≥ 0
-     */
-    double solve(double b, double c, double free, double guess) {
-        double now = guess;
-        for (int i = 0; i < MOST; i++) {
-            double psi = at(now);
-            double rise = slopeAt(now);
-            double left = free - c * (psi - rise * now);
-            double q = c * rise;
-            if (left <= 0) {
-                left = free;
-                q = c * psi / now;
-            }
-            double next = 2 * left / (q + Math.sqrt(Math.fma(q, q, 4 * b * left)));
-            if (Math.abs(next - now) <= NEAR * next) {
-                return next;
-            }
-            now = next;
-        }
-        return now;
     }
 
     private static double point(int j) {

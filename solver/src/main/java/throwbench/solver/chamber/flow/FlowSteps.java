@@ -32,25 +32,21 @@ public final class FlowSteps {
         int stations = sweep.count();
         double step = Angles.TURN / stations;
         double start = sweep.crankAngle()[0];
-        double first = angle[0];
-        double last = angle[angle.length - 1];
-        int piece = 0;
-        for (long i = (long) Math.ceil((first - start) / step); ; i++) {
+        long first = (long) Math.ceil((angle[0] - start) / step);
+        long last = (long) Math.floor((angle[angle.length - 1] - start) / step);
+        if (last < first) {
+            return;
+        }
+        int piece = search(start + first * step);
+        int station = (int) Math.floorMod(first, (long) stations);
+        for (long i = first; i <= last; i++) {
             double at = start + i * step;
-            if (at > last) {
-                return;
+            while (piece < angle.length - 2 && angle[piece + 1] < at) {
+                piece++;
             }
-            piece = piece == 0 ? search(at) : following(piece, at);
-            into[(int) Math.floorMod(i, (long) stations)] = cubic(piece, at);
+            into[station] = cubic(piece, at);
+            station = station + 1 == stations ? 0 : station + 1;
         }
-    }
-
-    private int following(int piece, double at) {
-        int p = piece;
-        while (p < angle.length - 2 && angle[p + 1] < at) {
-            p++;
-        }
-        return p;
     }
 
     private int search(double at) {

@@ -10,6 +10,12 @@ final class Landing {
 
     private static final int MOST = 60;
 
+    /** Trials after which nothing but halving is worth trying. */
+    private static final int HOPED = 20;
+
+    /** One trial in so many halves the bracket, in case the others creep. */
+    private static final int BISECTED = 6;
+
     private Landing() {}
 
     /**
@@ -17,27 +23,36 @@ final class Landing {
      *
      * @param longest a step that is too long, rad
      * @param atStart what it is before the step; not 0
+     * @param enough how near to the change, in the same measure, is near enough
      * @param trial what it is at the end of a step of a length; of the other sign, or 0, for the longest
-     * @return the length of the shortest step tried that reaches the change
+     * @return the length of a step that ends there
      */
-    static double length(double longest, double atStart, DoubleUnaryOperator trial) {
+    static double length(double longest, double atStart, double enough, DoubleUnaryOperator trial) {
         double before = 0;
         double beforeBy = atStart;
         double after = longest;
         double afterBy = trial.applyAsDouble(longest);
+        int side = 0;
         for (int i = 0; i < MOST && after - before > EXACT; i++) {
-            double at =
-                    i % 4 == 3 ? (before + after) / 2 : (before * afterBy - after * beforeBy) / (afterBy - beforeBy);
+            double at = (before * afterBy - after * beforeBy) / (afterBy - beforeBy);
+            if (i > HOPED || i % BISECTED == BISECTED - 1) {
+                at = (before + after) / 2;
+            }
             double by = trial.applyAsDouble(at);
-            if (by * atStart > 0) {
+            if (Math.abs(by) <= enough) {
+                return at;
+            }
+            boolean tooShort = by * atStart > 0;
+            if (tooShort) {
                 before = at;
                 beforeBy = by;
-                afterBy /= 2;
+                afterBy = side > 0 ? afterBy / 2 : afterBy;
             } else {
                 after = at;
                 afterBy = by;
-                beforeBy /= 2;
+                beforeBy = side < 0 ? beforeBy / 2 : beforeBy;
             }
+            side = tooShort ? 1 : -1;
         }
         return after;
     }

@@ -132,7 +132,8 @@ public final class LeakyTurn {
         Port crossed = crossed(reached);
         double taken = length;
         if (crossed != null) {
-            taken = Landing.length(length, pressure - crossed.line(), at -> step.take(at) - crossed.line());
+            taken = Landing.length(
+                    length, pressure - crossed.line(), ROUNDING * crossed.line(), at -> step.take(at) - crossed.line());
             step.take(taken);
             reached = crossed.line();
         }

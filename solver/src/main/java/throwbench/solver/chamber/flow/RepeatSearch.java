@@ -4,7 +4,7 @@ package throwbench.solver.chamber.flow;
  * Finds the two numbers that a turn leaves as it found them. Plain turns come closer by a share each, which may be a small
  * one; what turns did to the change they made tells where it vanishes (Broyden's method). A move is kept only when the next
  * turn changes less, else a shorter one is made from the best place so far, so that the search can't run away where a valve
- * begins or ceases to open.
+ * begins or ceases to open. Where such a kink holds it fast, a number of plain turns leads past.
  */
 public final class RepeatSearch {
 
@@ -28,6 +28,9 @@ public final class RepeatSearch {
     private boolean begun;
     private int failures;
     private int probe;
+    private double sizeWhenMeasured = Double.POSITIVE_INFINITY;
+    private int plainTurns;
+    private int nextPlainTurns = 8;
 
     public RepeatSearch(double first, double second) {
         at[0] = first;
@@ -50,7 +53,9 @@ public final class RepeatSearch {
      */
     public double ended(double first, double second) {
         double[] change = {first - at[0], second - at[1]};
-        if (probe > 0) {
+        if (plainTurns > 0) {
+            walk(change);
+        } else if (probe > 0) {
             measured(change);
         } else {
             judge(change);
@@ -73,12 +78,32 @@ public final class RepeatSearch {
             failures++;
         }
         begun = true;
-        if (failures > 0 && failures % PATIENCE == 0) {
+        if (failures == 0 || failures % PATIENCE != 0) {
+            move();
+        } else if (size(bestChange) > sizeWhenMeasured / 2) {
+            at[0] = best[0];
+            at[1] = best[1];
+            plainTurns = nextPlainTurns;
+            nextPlainTurns *= 2;
+            walk(bestChange);
+        } else {
+            sizeWhenMeasured = size(bestChange);
             probe = 1;
             at[0] = best[0] + PROBE;
             at[1] = best[1];
-        } else {
-            move();
+        }
+    }
+
+    private void walk(double[] change) {
+        at[0] += change[0];
+        at[1] += change[1];
+        plainTurns--;
+        if (plainTurns == 0) {
+            begun = false;
+            failures = 0;
+            reach = FURTHEST;
+            sizeWhenMeasured = Double.POSITIVE_INFINITY;
+            forget();
         }
     }
 

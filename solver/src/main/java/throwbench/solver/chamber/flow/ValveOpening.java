@@ -20,21 +20,32 @@ public final class ValveOpening {
     /** A step is at least this long however near the closing is, rad (0.1°): it is then landed on by root finding. */
     private static final double NEAR = Math.toRadians(0.1);
 
-    private static final double SHORTEST_START = 1e-5;
+    /** The valve is shut when so small a share of what the last step left is left of the pressure difference. */
+    private static final double SHUT = 1e-8;
+
+    private static final int TERMS = 8;
+
+    private static final double SMALL = 0.06;
 
     private final PistonPath path;
     private final double k;
-    private final FlowFit fit;
+    private final StageFlow stage;
+    private final double onset;
     private final double sense;
+    private final StepRule rule;
     private final double longest;
-    private final double growth;
     private final FlowSteps.Log log = new FlowSteps.Log();
 
     private double flowScale;
     private double exponent;
+
+    /** How much of the piston's share of y′ is left to the steps: 1 − n/k. */
+    private double piston;
+
     private double angle;
     private double ratio;
     private double u;
+    private double trend;
     private double slope;
     private double volume;
     private double volumeSlope;
@@ -44,22 +55,22 @@ public final class ValveOpening {
 
     // what a trial step leaves: state at its end and the flow over it
     private double endU;
+    private double endPsi;
+    private double endTrend;
     private double endVolume;
     private double endVolumeSlope;
-    private double meanFlow;
+    private double meanPsi;
 
-    /**
-     * @param suction whether gas enters from the suction line, or leaves towards the discharge line
-     * @param longest step, rad, at most {@link PistonPath#LONGEST}
-     * @param growth of each step over the one before, above 1
-     */
-    public ValveOpening(PistonPath path, FlowFunction law, boolean suction, double longest, double growth) {
+    /** @param suction whether gas enters from the suction line, or leaves towards the discharge line */
+    public ValveOpening(PistonPath path, FlowFunction law, boolean suction, StepRule rule) {
         this.path = path;
         this.k = law.k();
-        this.fit = suction ? FlowFit.inward(law) : FlowFit.outwardOnIsentrope(law);
+        FlowFit fit = suction ? FlowFit.inward(law) : FlowFit.outwardOnIsentrope(law);
+        this.stage = new StageFlow(fit, rule.near());
+        this.onset = fit.slopeAt(0);
         this.sense = suction ? 1 : -1;
-        this.longest = longest;
-        this.growth = growth;
+        this.rule = rule;
+        this.longest = rule.longest();
     }
 
     /**
@@ -75,6 +86,7 @@ public final class ValveOpening {
         volumeSlope = path.slope();
         ratio = 1;
         u = 0;
+        trend = 0;
         slope = -k * volumeSlope / volume;
         approach = 0;
         area = 0;
@@ -89,24 +101,27 @@ public final class ValveOpening {
         do {
             double step = Math.min(h, limit());
             advance(step);
-            h = Math.min(growth * step, longest);
+            h = Math.min(rule.growth() * step, longest);
         } while (u > 0);
     }
 
     /** A twentieth of the angle over which the flow comes to follow the piston. */
     private double firstStep() {
         double leaving = k * Math.abs(volumeSlope) / volume;
-        double response = k * flowScale * fit.slopeAt(0) / volume;
+        double response = k * flowScale * onset / volume;
         double relaxation = leaving / (response * response);
         double stiffness = longest / relaxation;
         double share = Math.max(0, 1 - 2 * stiffness);
         exponent = k * share * share;
-        return Math.max(SHORTEST_START, Math.min(longest / 4, relaxation / 20));
+        piston = 1 - share * share;
+        return Math.max(rule.shortest(), Math.min(longest / 4, relaxation / 20));
     }
 
-    /** Half the way to the closing, straight on along the last step's chord. */
+    /** Half the way to the closing, straight on along the last step's chord; less where the volume changes quickly. */
     private double limit() {
-        return approach > 0 ? Math.min(longest, Math.max(NEAR, u * u / approach / 2)) : longest;
+        double quick = rule.change() * volume / (k * Math.abs(volumeSlope));
+        double closing = approach > 0 ? Math.max(NEAR, u * u / approach / 2) : longest;
+        return Math.min(longest, Math.min(quick, closing));
     }
 
     private void advance(double step) {
@@ -114,7 +129,7 @@ public final class ValveOpening {
             accept(step);
             return;
         }
-        double shutting = Landing.length(step, u * u, this::open);
+        double shutting = Landing.length(step, u * u, SHUT * u * u, this::open);
         open(shutting);
         if (sense * endVolumeSlope < 0) {
             land(shutting);
@@ -122,74 +137,102 @@ public final class ValveOpening {
             // a valve can't shut before the dead centre: the second stage overshot
             accept(step);
         } else {
-            double slower = Landing.length(step, u * u, this::openByEuler);
+            double slower = Landing.length(step, u * u, SHUT * u * u, this::openByEuler);
             openByEuler(slower);
             land(slower);
         }
     }
 
     private void land(double step) {
-        endU = 0;
+        ends(0, 0, meanPsi);
         accept(step);
     }
 
     /** Tries a step of this length (rad): above 0 while the valve is still open at its end, and what drives it there. */
     private double open(double step) {
-        path.look(step);
-        endVolume = path.volume();
-        endVolumeSlope = path.slope();
-        double endTurns = exponent == 0 ? 1 : Math.pow(endVolume / volume, exponent);
         path.look(GAMMA * step);
-        double v = path.volume();
-        double turns = exponent == 0 ? 1 : Math.pow(v / volume, exponent);
+        double stageVolume = path.volume();
+        double stageVolumeSlope = path.slope();
+        look(step);
+        double turns = exponent == 0 ? 1 : power(stageVolume / volume - 1);
+        double endTurns = exponent == 0 ? 1 : power(endVolume / volume - 1);
         double weight = GAMMA * step * k;
-        double c = weight / v;
-        double b = Math.fma(c * (1 - exponent / k), path.slope(), 1);
+        double c = weight / stageVolume;
+        double b = Math.fma(c * piston, stageVolumeSlope, 1);
         double free = sense * (b - ratio / turns);
         if (free <= 0) {
-            return free;
+            // shut before the first stage: far beyond the place that a step is to land on
+            return free - u * u;
         }
-        double u1 = fit.solve(b, c * flowScale, free, u);
-        double y1 = 1 - sense * u1 * u1;
-        double carried = Math.fma(CARRY, turns * y1 - ratio, ratio);
+        stage.solve(b, c * flowScale, free, Math.max(u / 2, Math.fma(GAMMA * step, trend, u)));
+        double u1 = stage.u();
+        double psi1 = stage.psi();
+        double carried = Math.fma(CARRY, turns * (1 - sense * u1 * u1) - ratio, ratio);
         c = weight / endVolume;
-        b = Math.fma(c * (1 - exponent / k), endVolumeSlope, 1);
+        b = Math.fma(c * piston, endVolumeSlope, 1);
         free = sense * (b - carried / endTurns);
         if (free <= 0) {
             return free;
         }
-        endU = fit.solve(b, c * flowScale, free, u1);
-        meanFlow = flowScale * ((1 - GAMMA) * fit.at(u1) + GAMMA * fit.at(endU));
+        stage.solve(b, c * flowScale, free, Math.max(u1 / 2, u1 + CARRY * (u1 - u)));
+        ends(stage.u(), stage.psi(), (1 - GAMMA) * psi1 + GAMMA * stage.psi());
+        endTrend = (endU - u1) / ((1 - GAMMA) * step);
         return free;
+    }
+
+    /** (1 + d)^n, by eight terms of the binomial series while they leave less than 1e-11. */
+    private double power(double d) {
+        if (Math.abs(d) > SMALL) {
+            return Math.pow(1 + d, exponent);
+        }
+        double sum = 1;
+        for (int i = TERMS; i > 0; i--) {
+            sum = Math.fma((exponent - i + 1) / i * d, sum, 1);
+        }
+        return sum;
     }
 
     /** Tries the implicit Euler step, which keeps a valve open up to the dead centre. */
     private double openByEuler(double step) {
-        path.look(step);
-        endVolume = path.volume();
-        endVolumeSlope = path.slope();
+        look(step);
         double c = step * k / endVolume;
         double b = Math.fma(c, endVolumeSlope, 1);
         double free = sense * (b - ratio);
-        endU = free > 0 ? fit.solve(b, c * flowScale, free, u) : 0;
-        meanFlow = flowScale * fit.at(endU);
+        if (free > 0) {
+            stage.solve(b, c * flowScale, free, u);
+            ends(stage.u(), stage.psi(), stage.psi());
+            endTrend = 0;
+        }
         return free;
     }
 
-    private void accept(double step) {
+    private void look(double step) {
         path.look(step);
+        endVolume = path.volume();
+        endVolumeSlope = path.slope();
+    }
+
+    private void ends(double reached, double psi, double mean) {
+        endU = reached;
+        endPsi = psi;
+        meanPsi = mean;
+    }
+
+    /** Takes the step last tried. */
+    private void accept(double step) {
         path.advance();
         double endRatio = 1 - sense * endU * endU;
-        double endSlope = k / endVolume * (sense * flowScale * fit.at(endU) - endRatio * endVolumeSlope);
+        double endSlope = k / endVolume * (sense * flowScale * endPsi - endRatio * endVolumeSlope);
         // Simpson's rule on V y′ of the two cubics
         double middleVolume = (volume + endVolume) / 2 + step / 8 * (volumeSlope - endVolumeSlope);
         double middleSlope = 1.5 * (endRatio - ratio) / step - (slope + endSlope) / 4;
-        approach = (u * u - endU * endU) / step;
         area += step / 6 * (volume * slope + 4 * middleVolume * middleSlope + endVolume * endSlope);
-        flow += step * meanFlow;
+        flow += step * flowScale * meanPsi;
+        approach = (u * u - endU * endU) / step;
         angle += step;
         ratio = endRatio;
         u = endU;
+        trend = endTrend;
         slope = endSlope;
         volume = endVolume;
         volumeSlope = endVolumeSlope;

@@ -51,8 +51,11 @@ class FlowFitTest {
         for (double scale : new double[] {1e-6, 1e-2, 1, 1e4}) {
             for (double guess : new double[] {0, 1e-5, 0.5, 2}) {
                 for (FlowFit fit : new FlowFit[] {FlowFit.inward(law), FlowFit.outwardOnIsentrope(law)}) {
-                    double u = fit.solve(1.1, scale, free, guess);
+                    StageFlow stage = new StageFlow(fit, 1e-5);
+                    stage.solve(1.1, scale, free, guess);
+                    double u = stage.u();
                     assertEquals(free, 1.1 * u * u + scale * fit.at(u), 1e-9 * free);
+                    assertEquals(fit.at(u), stage.psi(), 1e-9 * fit.at(u));
                 }
             }
         }

@@ -18,8 +18,8 @@ class ValveOpeningTest {
 
     private static ValveOpening opening(double scale, double longestDegrees) {
         PistonPath path = new PistonPath(LINKAGE, Rotation.COUNTER_CLOCKWISE, CLEARANCE, AREA);
-        ValveOpening opening = new ValveOpening(
-                path, new FlowFunction(1.29), true, Math.toRadians(longestDegrees), 1 + longestDegrees / 4);
+        StepRule rule = new StepRule(Math.toRadians(longestDegrees), 1e-5, 1, 1 + longestDegrees / 4, 1e-5);
+        ValveOpening opening = new ValveOpening(path, new FlowFunction(1.29), true, rule);
         opening.run(Math.toRadians(40), scale);
         return opening;
     }
