@@ -29,11 +29,12 @@ final class MapCommand implements Command {
         return """
                 Computes one result over two numbers of the machine file.
 
-                  --across KEY=FROM..TO:N  the number along rows, as "drive.speed=600 rpm..1000 rpm:20": its key path in
-                                           the machine file, two values with units, N values with both ends
+                  --across KEY=FROM..TO:N  the number along rows, as "drive.speed=600 rpm..1000 rpm:20": its key
+                                           path in the machine file, two values with units, and how many
+                                           values, both ends counted
                   --up KEY=FROM..TO:N      the other number, from row to row
-                  --of RESULT              ID or ID.margin of a finding, as reversal-duration.margin; or COLUMN.max or
-                                           COLUMN.min of a column of solve, as rod_load_N.max
+                  --of RESULT              ID or ID.margin of a finding, as reversal-duration.margin; or
+                                           COLUMN.max or COLUMN.min of a column of solve, as rod_load_N.max
                   --duty NAME              the duty point; the first one if left out
                   --throw NAME             the throw, where the result is one throw's; the first one if left out
                   --out FILE               where to write; standard output if left out
@@ -61,8 +62,8 @@ final class MapCommand implements Command {
         if (source.isEmpty() || subject.isEmpty()) {
             return ExitCode.REFUSED;
         }
-        Optional<Stretch> rows = Stretch.read(Option.ACROSS, across.get(), subject.get(), source.get(), terminal);
-        Optional<Stretch> columns = Stretch.read(Option.UP, up.get(), subject.get(), source.get(), terminal);
+        Optional<Stretch> columns = Stretch.read(Option.ACROSS, across.get(), subject.get(), source.get(), terminal);
+        Optional<Stretch> rows = Stretch.read(Option.UP, up.get(), subject.get(), source.get(), terminal);
         Optional<Result> result =
                 ResultWords.result(Option.OF, of.get(), source.get().machine(), terminal);
         if (rows.isEmpty() || columns.isEmpty() || result.isEmpty()) {
@@ -72,7 +73,7 @@ final class MapCommand implements Command {
             terminal.complain("throwbench", Option.UP.word(), "the same number as --across, another one is wanted");
             return ExitCode.REFUSED;
         }
-        DutyMap map = new MapRun(subject.get(), axis(rows.get()), axis(columns.get()), result.get())
+        DutyMap map = new MapRun(subject.get(), axis(columns.get()), axis(rows.get()), result.get())
                 .fill(Workers.cores(), new ProgressBar(terminal));
         return OutputFile.deliver(new DutyMapCsv(map), arguments, terminal) ? ExitCode.DONE : ExitCode.REFUSED;
     }

@@ -8,6 +8,8 @@ import throwbench.solver.map.Outcome;
 import throwbench.solver.map.Sensitivity;
 import throwbench.solver.map.Subject;
 import throwbench.solver.map.Workers;
+import throwbench.solver.revolution.RunningMachine;
+import throwbench.solver.revolution.Settling;
 
 /** {@code sensitivity}: which numbers of the machine file a finding's margin hangs on most. */
 final class SensitivityCommand implements Command {
@@ -53,13 +55,19 @@ final class SensitivityCommand implements Command {
             return ExitCode.REFUSED;
         }
         Optional<FindingResult> finding = ResultWords.margin(Option.OF_FINDING, of.get(), terminal);
-        return finding.isPresent() ? study(subject.get(), finding.get(), terminal) : ExitCode.REFUSED;
+        if (finding.isEmpty()) {
+            return ExitCode.REFUSED;
+        }
+        Settling nominal =
+                RunningMachine.settle(subject.get().machine(), subject.get().dutyPoint());
+        return nominal.running().isPresent()
+                ? study(subject.get(), finding.get(), nominal.get(), terminal)
+                : source.get().refuse(nominal.refusals());
     }
 
-    private static ExitCode study(Subject subject, FindingResult result, Terminal terminal) {
-        Subject.Attempt nominal = subject.with(List.of());
-        Outcome margin = nominal.ask(result.probe(subject.shownThrow()));
-        Optional<Finding> finding = nominal.running().flatMap(r -> result.finding(r, subject.shownThrow()));
+    private static ExitCode study(Subject subject, FindingResult result, RunningMachine nominal, Terminal terminal) {
+        Outcome margin = result.probe(subject.shownThrow()).at(nominal);
+        Optional<Finding> finding = result.finding(nominal, subject.shownThrow());
         if (margin.value().isEmpty() || finding.isEmpty()) {
             terminal.complain(
                     "throwbench",

@@ -31,19 +31,20 @@ public final class Terminal {
     /** The streams of this process. Only Linux tells whether standard error is a terminal; elsewhere none is assumed. */
     public static Terminal ofProcess() {
         return new Terminal(
-                new FileOutputStream(FileDescriptor.out),
-                new FileOutputStream(FileDescriptor.err),
-                isTerminal(Path.of("/proc/self/fd/2")));
+                new FileOutputStream(FileDescriptor.out), new FileOutputStream(FileDescriptor.err), isErrTerminal());
     }
 
-    /** Whether a link to an open file leads to a terminal. */
-    static boolean isTerminal(Path link) {
+    private static boolean isErrTerminal() {
         try {
-            String target = Files.readSymbolicLink(link).toString();
-            return target.startsWith("/dev/pts/") || target.startsWith("/dev/tty");
+            return isTerminal(Files.readSymbolicLink(Path.of("/proc/self/fd/2")).toString());
         } catch (IOException | UnsupportedOperationException noSuchLink) {
             return false;
         }
+    }
+
+    /** Whether an open file of this name is a terminal. */
+    static boolean isTerminal(String device) {
+        return device.startsWith("/dev/pts/") || device.startsWith("/dev/tty") || device.equals("/dev/console");
     }
 
     /** Whether somebody sees how a line on standard error changes. */

@@ -6,6 +6,8 @@ import java.util.OptionalLong;
 import throwbench.solver.map.Subject;
 import throwbench.solver.map.ToleranceStudy;
 import throwbench.solver.map.Workers;
+import throwbench.solver.revolution.RunningMachine;
+import throwbench.solver.revolution.Settling;
 
 /** {@code tolerance}: how often machines within the file's tolerances meet its findings. */
 final class ToleranceCommand implements Command {
@@ -55,10 +57,10 @@ final class ToleranceCommand implements Command {
         if (source.isEmpty() || subject.isEmpty()) {
             return ExitCode.REFUSED;
         }
-        Subject.Attempt nominal = subject.get().with(List.of());
+        Settling nominal =
+                RunningMachine.settle(subject.get().machine(), subject.get().dutyPoint());
         if (nominal.running().isEmpty()) {
-            source.get().complain("", nominal.reason());
-            return ExitCode.REFUSED;
+            return source.get().refuse(nominal.refusals());
         }
         if (ToleranceStudy.toleranced(subject.get()).isEmpty()) {
             source.get().complain("", "no quantity of this duty point carries a tolerance, as \"75 mm ± 0.1 mm\"");
@@ -66,7 +68,7 @@ final class ToleranceCommand implements Command {
         }
         ToleranceStudy study = ToleranceStudy.of(
                         subject.get(),
-                        nominal.running().get(),
+                        nominal.get(),
                         (int) samples.getAsLong(),
                         seed.getAsLong(),
                         Workers.cores(),

@@ -43,6 +43,15 @@ class CommandLineTest {
                     Solves one throw of a machine over the revolution at a duty point.
                 throwbench check MACHINE.json [--duty NAME] [--format text|json]
                     Judges a machine against its limits. The exit code is 0 when every judged finding is met, else 1.
+                throwbench map MACHINE.json --across KEY=FROM..TO:N --up KEY=FROM..TO:N --of RESULT [--duty NAME]
+                        [--throw NAME] [--out FILE]
+                    Computes one result over two numbers of the machine file.
+                throwbench limit MACHINE.json --vary KEY=FROM..TO --until ID [--duty NAME] [--throw NAME]
+                    Finds how far one number of the machine file may go until a finding is just met.
+                throwbench sensitivity MACHINE.json --of ID [--duty NAME] [--throw NAME]
+                    Ranks the numbers of the machine file by how much a finding's margin changes with them.
+                throwbench tolerance MACHINE.json [--samples 10000] [--seed 1] [--duty NAME]
+                    Judges many machines drawn within the tolerances of the file, as "75 mm ± 0.1 mm".
                 throwbench COMMAND --help
                     tells more of a command
                 throwbench --version
@@ -57,13 +66,19 @@ class CommandLineTest {
 
     @Test
     void helpOfACommandTellsOfEveryOptionItTakes() {
-        for (Command command : List.of(new SolveCommand(), new CheckCommand())) {
+        for (Command command : List.of(
+                new SolveCommand(),
+                new CheckCommand(),
+                new MapCommand(),
+                new LimitCommand(),
+                new SensitivityCommand(),
+                new ToleranceCommand())) {
             Run run = Run.of(command.name(), "--help");
 
             assertEquals(ExitCode.DONE, run.code());
             assertEquals("throwbench " + command.synopsis() + "\n\n" + command.help(), run.out());
             for (Option option : command.options()) {
-                assertTrue(command.synopsis().contains("[" + option.word() + " "), option.word());
+                assertTrue(command.synopsis().contains(option.word() + " "), option.word());
                 assertTrue(command.help().contains("  " + option.word() + " "), option.word());
             }
             assertTrue(command.help().lines().allMatch(line -> line.length() <= 100), command.name());
@@ -81,7 +96,10 @@ class CommandLineTest {
     @Test
     void anUnknownCommandIsToldWhichAreNearAndWhichThereAre() {
         assertRefused("throwbench: sovle: no such command; perhaps solve\n", "sovle", "m.json");
-        assertRefused("throwbench: map: no such command; there are solve and check\n", "map", "m.json");
+        assertRefused(
+                "throwbench: plot: no such command; there are solve, check, map, limit, sensitivity and tolerance\n",
+                "plot",
+                "m.json");
         assertRefused("throwbench: --hlep: no such option; perhaps --help\n", "--hlep");
         assertRefused("throwbench: -x: no such option; there are --help and --version\n", "-x");
     }
