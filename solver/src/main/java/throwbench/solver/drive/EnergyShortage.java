@@ -18,8 +18,12 @@ final class EnergyShortage {
      * @param pieces of the turn, with the load last read
      */
     static String sentence(List<SpeedPiece> pieces, double rotatingInertia, double meanSpeed) {
-        return "no speed is found that repeats: the load takes up to " + rounded(fluctuation(pieces))
-                + " J from the shaft within a turn, and " + rounded(rotatingInertia) + " kg m2 hold "
+        double taken = fluctuation(pieces);
+        // a search that ran away leaves no load to read
+        String load = Double.isFinite(taken)
+                ? "the load takes up to " + rounded(taken) + " J from the shaft within a turn, and "
+                : "";
+        return "no speed is found that repeats: " + load + rounded(rotatingInertia) + " kg m2 hold "
                 + rounded(rotatingInertia * meanSpeed * meanSpeed / 2)
                 + " J at the mean speed; wanted more rotatingInertia";
     }
