@@ -41,7 +41,6 @@ public final class BuildSheet extends VBox {
         HBox top = new HBox(12, heading, search);
         top.setPadding(new Insets(0, 10, 0, 0));
         top.getStyleClass().add("heading-row");
-        heading.setStyle("-fx-font-size: 14px; -fx-font-weight: bold;");
         ScrollPane scroll = new ScrollPane(groups);
         scroll.setFitToWidth(true);
         scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);

@@ -2,6 +2,7 @@ package throwbench.app.window;
 
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import javafx.animation.Timeline;
 import javafx.application.Platform;
@@ -79,7 +80,7 @@ final class BenchWindow implements MachineMenu.Actions {
         root.getStyleClass().add("bench");
         scene = new Scene(root, 1600, 900);
         wear(Theme.LIGHT);
-        Keys.install(scene, bench, this);
+        Keys.install(scene, bench);
         // keys that no control took turn the crank, wherever the keyboard is
         scene.addEventHandler(KeyEvent.KEY_PRESSED, strip::scrub);
         clock = new FrameClock(bench, List.<View>of(linkage, strip, gauges, findings));
@@ -156,10 +157,6 @@ final class BenchWindow implements MachineMenu.Actions {
         System.getLogger("throwbench").log(System.Logger.Level.ERROR, "in the window", failure);
     }
 
-    Scene scene() {
-        return scene;
-    }
-
     @Override
     public void open() {
         if (mayClose()) {
@@ -185,14 +182,13 @@ final class BenchWindow implements MachineMenu.Actions {
     }
 
     private boolean savedAs() {
-        String suggested =
-                bench.shown()
-                                .get()
-                                .machine()
-                                .name()
-                                .strip()
-                                .toLowerCase(java.util.Locale.ROOT)
-                                .replace(' ', '-') + ".json";
+        String suggested = bench.shown()
+                        .get()
+                        .machine()
+                        .name()
+                        .strip()
+                        .toLowerCase(Locale.ROOT)
+                        .replace(' ', '-') + ".json";
         return dialogs.fileToSave(suggested).map(bench::save).orElse(false);
     }
 

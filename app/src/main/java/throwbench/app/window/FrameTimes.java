@@ -37,9 +37,4 @@ final class FrameTimes {
         Arrays.sort(sorted);
         return sorted[(int) Math.min(size - 1L, Math.round(share * size))] / 1e6;
     }
-
-    /** Frames so far. */
-    int count() {
-        return count;
-    }
 }

@@ -30,7 +30,7 @@ final class Keys {
 
     private Keys() {}
 
-    static void install(Scene scene, Bench bench, MachineMenu.Actions actions) {
+    static void install(Scene scene, Bench bench) {
         scene.addEventFilter(KeyEvent.KEY_PRESSED, event -> {
             if (event.isShortcutDown() || event.isAltDown()) {
                 return;

@@ -1,5 +1,7 @@
 package throwbench.app.window;
 
+import java.util.Optional;
+import java.util.function.Consumer;
 import javafx.scene.control.CheckMenuItem;
 import javafx.scene.control.MenuButton;
 import javafx.scene.control.MenuItem;
@@ -76,8 +78,7 @@ final class MachineMenu extends MenuButton {
         return item;
     }
 
-    private static CheckMenuItem check(
-            String text, String key, boolean on, java.util.function.Consumer<Boolean> action) {
+    private static CheckMenuItem check(String text, String key, boolean on, Consumer<Boolean> action) {
         CheckMenuItem item = new CheckMenuItem(text);
         item.setSelected(on);
         item.setAccelerator(KeyCombination.keyCombination(key));
@@ -86,7 +87,7 @@ final class MachineMenu extends MenuButton {
     }
 
     /** Names the edits that undo and redo would act on. */
-    void tellHistory(java.util.Optional<String> undoName, java.util.Optional<String> redoName) {
+    void tellHistory(Optional<String> undoName, Optional<String> redoName) {
         undo.setText(undoName.map(n -> "Undo " + n).orElse("Undo"));
         undo.setDisable(undoName.isEmpty());
         redo.setText(redoName.map(n -> "Redo " + n).orElse("Redo"));

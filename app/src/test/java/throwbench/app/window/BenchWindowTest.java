@@ -7,6 +7,7 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.ExecutorService;
 import java.util.concurrent.Executors;
@@ -172,7 +173,7 @@ class BenchWindowTest {
     void aBrokenFileIsSaidInTheStatusLine(FxRobot robot, @TempDir Path folder) throws IOException, TimeoutException {
         Path file = folder.resolve("broken.json");
         Files.writeString(file, "{ \"throwbench\": 1,");
-        dialogs.open = java.util.Optional.of(file);
+        dialogs.open = Optional.of(file);
         robot.press(KeyCode.CONTROL).type(KeyCode.O).release(KeyCode.CONTROL);
         until(() -> status(robot).startsWith("broken.json: line 1"));
         assertEquals("Saltmarsh biogas booster", bench.shown().get().machine().name());
@@ -185,7 +186,7 @@ class BenchWindowTest {
         Label edited = robot.lookup("#edited").queryAs(Label.class);
         until(edited::isVisible);
         Path file = folder.resolve("saved.json");
-        dialogs.save = java.util.Optional.of(file);
+        dialogs.save = Optional.of(file);
         robot.press(KeyCode.CONTROL).type(KeyCode.S).release(KeyCode.CONTROL);
         until(() -> !edited.isVisible());
         assertTrue(Files.readString(file).contains("\"730 rpm\""));
